@@ -1,0 +1,86 @@
+import type { Conditions, Helm, Plan, TrialEvent } from '../plan/types'
+import type { Series } from './channels'
+
+export type Solver = 'fixed-step' | 'adaptive'
+
+export interface TrialRequest {
+  plan: Plan
+  conditions: Conditions
+  events: TrialEvent[]
+  helm: Helm
+  solver: Solver
+  durationS: number
+  outputIntervalS: number
+}
+
+/** Something that happened during a run, at a moment. */
+export interface Happening {
+  atS: number
+  code:
+    | 'tacked'
+    | 'gybed'
+    | 'broached'
+    | 'line-slack'
+    | 'elastic-slack'
+    | 'tiller-on-stop'
+    | 'left-valid-range'
+    | 'gust'
+    | 'wind-shift'
+    | 'wave-set'
+    | 'reef'
+  text: string
+}
+
+export interface Metrics {
+  holds: boolean
+  meanCourseToWindDeg: number
+  rmsCourseErrorDeg: number
+  maxCourseErrorDeg: number
+  withinBandFraction: number
+  meanSpeedKn: number
+  balanceSpeedKn: number
+  maxHeelDeg: number
+  peakControlLineN: number
+  peakElasticN: number
+  peakSheetN: number
+}
+
+export type VerdictCode =
+  | 'holds'
+  | 'holds-other-course'
+  | 'creeps-to-windward'
+  | 'sags-to-leeward'
+  | 'hunts'
+  | 'luffs'
+  | 'tacks'
+  | 'gybes'
+  | 'broaches'
+  | 'too-slow'
+  | 'stopped'
+
+export interface Verdict {
+  code: VerdictCode
+  /** One sentence in a sailor's words. */
+  text: string
+  /** Why, in one or two sentences. */
+  reason: string
+}
+
+/** The course band a run is judged against, both positive with the wind over the starboard side. */
+export interface Band {
+  centreDeg: number
+  halfWidthDeg: number
+}
+
+export interface TrialResult {
+  modelVersion: string
+  verdict: Verdict
+  metrics: Metrics
+  happenings: Happening[]
+  band: Band
+  series: Series
+  /** Boom or clew angle of each sail set, degrees, positive with the clew to starboard. */
+  boomDeg: Record<string, Float64Array>
+  /** Drawing or flogging: normal force over that of a full sail, 0..1, per sail set. */
+  drawing: Record<string, Float64Array>
+}
