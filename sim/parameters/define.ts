@@ -43,7 +43,7 @@ export interface Choice<Option extends string = string> {
   readonly type: 'choice'
   readonly label: string
   readonly options: Readonly<Record<Option, string>>
-  readonly default: Option
+  readonly default: NoInfer<Option>
   readonly source: string
   readonly effect?: string
 }
