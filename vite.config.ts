@@ -1,0 +1,31 @@
+import { reactRouter } from '@react-router/dev/vite'
+import tailwindcss from '@tailwindcss/vite'
+import { defineConfig } from 'vite'
+import { aliases } from './aliases.ts'
+
+export default defineConfig({
+  plugins: [tailwindcss(), reactRouter()],
+  resolve: { alias: aliases },
+  environments: {
+    ssr: { build: { rollupOptions: { input: './app/server/app.ts' } } },
+  },
+  optimizeDeps: {
+    include: [
+      '@tanstack/react-query',
+      'comlink',
+      'd3-scale',
+      'd3-shape',
+      'mathjs/number',
+      'odex',
+      'react',
+      'react-dom',
+      'react-dom/client',
+      'react/jsx-dev-runtime',
+      'react/jsx-runtime',
+      'react-router',
+      'react-router/dom',
+      'zod',
+    ],
+  },
+  worker: { format: 'es' },
+})

@@ -1,0 +1,42 @@
+import { defineConfig } from 'vitest/config'
+import { aliases } from './aliases.ts'
+
+const resolve = { alias: aliases }
+
+export default defineConfig({
+  test: {
+    projects: [
+      {
+        resolve,
+        test: {
+          name: 'node',
+          include: ['tests/{laws,outside,unit}/**/*.test.{ts,tsx}'],
+          environment: 'node',
+          testTimeout: 60_000,
+        },
+      },
+      {
+        resolve,
+        test: {
+          name: 'database',
+          include: ['tests/database/**/*.test.ts'],
+          environment: 'node',
+          testTimeout: 60_000,
+          fileParallelism: false,
+        },
+      },
+      {
+        resolve,
+        test: {
+          name: 'browser',
+          include: ['tests/browser/**/*.test.ts'],
+          globalSetup: ['tests/browser/server.setup.ts'],
+          environment: 'node',
+          testTimeout: 90_000,
+          hookTimeout: 60_000,
+          fileParallelism: false,
+        },
+      },
+    ],
+  },
+})
