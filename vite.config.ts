@@ -2,9 +2,10 @@ import { reactRouter } from '@react-router/dev/vite'
 import tailwindcss from '@tailwindcss/vite'
 import { defineConfig } from 'vite'
 import { aliases } from './aliases.ts'
+import { nodeThreads } from './node-threads.ts'
 
 export default defineConfig({
-  plugins: [tailwindcss(), reactRouter()],
+  plugins: [tailwindcss(), reactRouter(), nodeThreads()],
   resolve: { alias: aliases },
   environments: {
     ssr: { build: { rollupOptions: { input: './app/server/app.ts' } } },

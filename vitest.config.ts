@@ -1,12 +1,15 @@
 import { defineConfig } from 'vitest/config'
 import { aliases } from './aliases.ts'
+import { nodeThreads } from './node-threads.ts'
 
+const plugins = [nodeThreads()]
 const resolve = { alias: aliases }
 
 export default defineConfig({
   test: {
     projects: [
       {
+        plugins,
         resolve,
         test: {
           name: 'node',
@@ -16,6 +19,7 @@ export default defineConfig({
         },
       },
       {
+        plugins,
         resolve,
         test: {
           name: 'database',
@@ -26,6 +30,7 @@ export default defineConfig({
         },
       },
       {
+        plugins,
         resolve,
         test: {
           name: 'browser',

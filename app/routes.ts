@@ -1,3 +1,15 @@
-import { index, type RouteConfig } from '@react-router/dev/routes'
+import { index, prefix, type RouteConfig, route } from '@react-router/dev/routes'
 
-export default [index('routes/sea-trial.tsx')] satisfies RouteConfig
+export default [
+  index('routes/sea-trial.tsx'),
+  ...prefix('api', [
+    route('health', 'routes/api/health.ts'),
+    route('boats', 'routes/api/boats.ts'),
+    route('boats/:id', 'routes/api/boat.ts'),
+    route('setups', 'routes/api/setups.ts'),
+    route('setups/:id', 'routes/api/setup.ts'),
+    route('simulate', 'routes/api/simulate.ts'),
+    route('openapi.json', 'routes/api/openapi.ts'),
+    route('*', 'routes/api/unknown.ts'),
+  ]),
+] satisfies RouteConfig

@@ -1,0 +1,47 @@
+import { Problem } from './problem'
+
+export const tooLarge = (limit: number) =>
+  new Problem(413, `The body may hold at most ${limit} bytes.`, {
+    headers: { connection: 'close' },
+  })
+
+export const notJson = (detail = 'The body must be application/json.') =>
+  new Problem(415, detail, { headers: { 'accept-post': 'application/json' } })
+
+/** The JSON of a request's body; refuses other content, malformed JSON and more than `limit` bytes. */
+export async function readJsonBody(request: Request, limit: number): Promise<unknown> {
+  const contentType = request.headers.get('content-type') ?? ''
+  const [mediaType = '', ...parameters] = contentType.split(';').map((part) => part.trim())
+  if (mediaType.toLowerCase() !== 'application/json') throw notJson()
+  const charset = parameters.find((part) => /^charset=/i.test(part))
+  if (charset && !/^charset="?utf-?8"?$/i.test(charset)) {
+    throw notJson('The body must be encoded in UTF-8.')
+  }
+  if ((request.headers.get('content-encoding') ?? 'identity') !== 'identity') {
+    throw notJson('The body must not be compressed.')
+  }
+  const bytes = await readAtMost(request, limit)
+  try {
+    return JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes))
+  } catch (error) {
+    const reason = error instanceof SyntaxError ? error.message : 'it is not UTF-8'
+    throw new Problem(400, `The body is not valid JSON (${reason}).`)
+  }
+}
+
+/** Counts what arrives, because the announced length may be missing or wrong. */
+async function readAtMost(request: Request, limit: number): Promise<Uint8Array> {
+  if (Number(request.headers.get('content-length')) > limit) throw tooLarge(limit)
+  const chunks: Uint8Array[] = []
+  let length = 0
+  const reader = request.body?.getReader()
+  for (let part = await reader?.read(); part?.value; part = await reader?.read()) {
+    length += part.value.byteLength
+    if (length > limit) {
+      await reader?.cancel()
+      throw tooLarge(limit)
+    }
+    chunks.push(part.value)
+  }
+  return Buffer.concat(chunks)
+}

@@ -1,0 +1,4 @@
+import pino from 'pino'
+
+/** One JSON line per event, on standard output. */
+export const log = pino({ base: null })
