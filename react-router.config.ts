@@ -2,5 +2,6 @@ import type { Config } from '@react-router/dev/config'
 
 export default {
   ssr: true,
+  buildDirectory: process.env.BUILD_FOLDER ?? 'build/application',
   future: { v8_middleware: true, v8_viteEnvironmentApi: true },
 } satisfies Config

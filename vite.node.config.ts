@@ -1,13 +1,13 @@
 import { defineConfig } from 'vite'
 import { aliases } from './aliases.ts'
 
-/** Programs that Node runs beside the web server, which it cannot run as TypeScript. */
+/** Parts of the project that its commands run in Node, which cannot run TypeScript itself. */
 export default defineConfig({
   resolve: { alias: aliases },
   build: {
     ssr: true,
-    outDir: 'build/node',
+    outDir: process.env.BUILD_FOLDER ?? 'build/programs',
     target: 'node20',
-    rollupOptions: { input: { 'prepare-database': 'drizzle/prepare.ts' } },
+    rolldownOptions: { input: { 'prepare-database': 'drizzle/prepare.ts' } },
   },
 })

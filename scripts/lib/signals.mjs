@@ -1,0 +1,35 @@
+const controller = new AbortController()
+
+/** Aborted, with the signal as its reason, once the run was asked to stop. */
+export const stopRequested = controller.signal
+
+/**
+ * From now on a signal asks the run to stop and does not end it. A terminal sends its signal to
+ * the whole group and npm passes it on again, so a second one says nothing new.
+ */
+export function listenForSignals() {
+  for (const signal of /** @type {const} */ (['SIGINT', 'SIGTERM', 'SIGHUP'])) {
+    process.on(signal, () => controller.abort(signal))
+  }
+  stopWithNpm()
+}
+
+/** npm that was killed outright passes no signal on: its script would go on without it. */
+function stopWithNpm() {
+  if (process.env.npm_lifecycle_event === undefined) return
+  const npm = process.ppid
+  const watch = setInterval(() => {
+    if (process.ppid === npm) return
+    clearInterval(watch)
+    controller.abort('SIGTERM')
+  }, 500)
+  watch.unref()
+}
+
+/** @returns {Promise<void>} */
+export function untilStopRequested() {
+  return new Promise((resolve) => {
+    if (stopRequested.aborted) resolve()
+    else stopRequested.addEventListener('abort', () => resolve())
+  })
+}
