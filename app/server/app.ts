@@ -5,6 +5,7 @@ import { builtFiles } from './built-files'
 import { answerFaults } from './faults'
 import { nonceContext } from './load-context'
 import { logRequests } from './request-log'
+import { refuseUnknownMethods } from './request-method'
 import { limitRequestBody } from './request-size'
 import { securityHeaders } from './security-headers'
 
@@ -15,6 +16,7 @@ export function createApp({ clientFolder }: { clientFolder?: string } = {}) {
   app.use(logRequests)
   if (import.meta.env.PROD) app.use(securityHeaders)
   if (clientFolder !== undefined) app.use(builtFiles(clientFolder))
+  app.use(refuseUnknownMethods)
   app.use(limitRequestBody)
   app.use(
     createRequestHandler({

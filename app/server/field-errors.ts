@@ -58,10 +58,10 @@ function fieldErrorsOf(
   ]
 }
 
-/** Leaves the text of a missing or out-of-range value to `textOf`, which knows the whole range. */
+/** Leaves the text of a missing, mistyped or out-of-range value to `textOf`, which knows what may be. */
 function withoutText(issue: z.core.$ZodRawIssue): string | undefined {
   if (issue.input === undefined) return ''
-  if (issue.code === 'invalid_type') return /^(number|int)$/.test(issue.expected) ? '' : undefined
+  if (issue.code === 'invalid_type') return ''
   if (issue.code === 'too_small' || issue.code === 'too_big') {
     return issue.origin === 'number' ? '' : undefined
   }
@@ -71,9 +71,15 @@ function withoutText(issue: z.core.$ZodRawIssue): string | undefined {
 function textOf(given: unknown, range: Range, schema: z.ZodType | undefined): string {
   const missing = given === undefined ? 'is missing: it ' : ''
   if (range.allowed) return `${missing}must be one of ${range.allowed.join(', ')}`
-  if (range.min === undefined) return given === undefined ? 'is missing' : 'is not allowed here'
+  if (range.min === undefined) return `${missing}must be ${kindOf(schema)}`
   const whole = schema instanceof z.ZodNumber && schema.format?.includes('int') ? 'whole ' : ''
   return `${missing}must be a ${whole}number from ${range.min} to ${range.max}`
+}
+
+function kindOf(schema: z.ZodType | undefined): string {
+  if (schema instanceof z.ZodArray) return 'a list'
+  if (schema instanceof z.ZodString) return 'a text'
+  return 'an object'
 }
 
 function unknownKey(path: Path, key: string, known: string[], value: unknown): FieldError {

@@ -21,12 +21,25 @@ export async function readJsonBody(request: Request, limit: number): Promise<unk
     throw notJson('The body must not be compressed.')
   }
   const bytes = await readAtMost(request, limit)
+  let text: string
   try {
-    return JSON.parse(new TextDecoder('utf-8', { fatal: true }).decode(bytes))
+    text = new TextDecoder('utf-8', { fatal: true }).decode(bytes)
+  } catch {
+    throw new Problem(400, 'The body is not valid JSON (it is not UTF-8).')
+  }
+  try {
+    return JSON.parse(text, withoutPrototype)
   } catch (error) {
-    const reason = error instanceof SyntaxError ? error.message : 'it is not UTF-8'
+    if (error instanceof Problem) throw error
+    const reason = error instanceof SyntaxError ? error.message : 'it is nested too deeply'
     throw new Problem(400, `The body is not valid JSON (${reason}).`)
   }
+}
+
+/** The schemas pass over this key in silence, so it is refused before they see it. */
+function withoutPrototype(key: string, value: unknown): unknown {
+  if (key === '__proto__') throw new Problem(400, 'No field may be called __proto__.')
+  return value
 }
 
 /** Counts what arrives, because the announced length may be missing or wrong. */
@@ -37,10 +50,7 @@ async function readAtMost(request: Request, limit: number): Promise<Uint8Array> 
   const reader = request.body?.getReader()
   for (let part = await reader?.read(); part?.value; part = await reader?.read()) {
     length += part.value.byteLength
-    if (length > limit) {
-      await reader?.cancel()
-      throw tooLarge(limit)
-    }
+    if (length > limit) throw tooLarge(limit)
     chunks.push(part.value)
   }
   return Buffer.concat(chunks)

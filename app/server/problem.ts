@@ -1,7 +1,5 @@
 import { STATUS_CODES } from 'node:http'
-import { DrizzleQueryError } from 'drizzle-orm'
 import { z } from 'zod'
-import { log } from './log'
 
 const fieldErrorSchema = z.strictObject({
   field: z.string(),
@@ -57,31 +55,4 @@ export class Problem extends Error {
       headers: { ...this.more.headers, 'content-type': 'application/problem+json' },
     })
   }
-}
-
-/** The answer of a resource route, with whatever goes wrong turned into problem details. */
-export async function answer(work: () => Promise<Response> | Response): Promise<Response> {
-  try {
-    return await work()
-  } catch (error) {
-    return problemOf(error).response()
-  }
-}
-
-function problemOf(error: unknown): Problem {
-  if (error instanceof Problem) return error
-  log.error({ err: error }, 'a request failed')
-  return error instanceof DrizzleQueryError
-    ? new Problem(503, 'The database does not answer; try again shortly.', {
-        headers: { 'retry-after': '5' },
-      })
-    : new Problem(500, 'Something went wrong here; it has been recorded.')
-}
-
-/** Refuses the methods a resource does not have, naming those it has. */
-export function methodNotAllowed(allow: string) {
-  return ({ request }: { request: Request }): Response =>
-    new Problem(405, `${request.method} is not allowed here; use ${allow}.`, {
-      headers: { allow },
-    }).response()
 }

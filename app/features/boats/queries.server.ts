@@ -1,7 +1,8 @@
 import { boats } from 'db/schema/boats'
 import { asc, eq } from 'drizzle-orm'
+import { sailParameters } from 'sim/parameters/sails'
 import { boatSchema } from 'sim/plan/schema'
-import type { Boat } from 'sim/plan/types'
+import type { Boat, Sail } from 'sim/plan/types'
 import { database } from '~/server/database'
 import type { BoatEntry } from './schema'
 
@@ -23,5 +24,13 @@ export async function getBoat(id: string): Promise<Boat | undefined> {
 
 /** The boat that a row describes. */
 export function boatOf(row: Pick<typeof boats.$inferSelect, 'id' | 'document'>): Boat {
-  return boatSchema.parse({ ...(row.document as object), id: row.id })
+  const boat: Boat = boatSchema.parse({ ...(row.document as object), id: row.id })
+  return { ...boat, sails: inRigOrder(boat.sails) }
+}
+
+/** The database keeps no order of keys: mainsail first, then as the table of kinds has them. */
+function inRigOrder(sails: Boat['sails']): Boat['sails'] {
+  const kinds = Object.keys(sailParameters.kind.options)
+  const place = ([, sail]: [string, Sail]) => kinds.indexOf(sail.kind)
+  return Object.fromEntries(Object.entries(sails).sort((a, b) => place(a) - place(b)))
 }

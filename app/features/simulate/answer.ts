@@ -134,7 +134,7 @@ function rounded(value: number): number | null {
 
 function columnsOf<Name extends string, Value>(
   names: readonly Name[],
-  valueOf: (name: Name) => Value,
+  make: (name: Name) => Value,
 ): Record<Name, Value> {
-  return Object.fromEntries(names.map((name) => [name, valueOf(name)])) as Record<Name, Value>
+  return Object.fromEntries(names.map((name) => [name, make(name)])) as Record<Name, Value>
 }

@@ -1,4 +1,4 @@
-import { holdInterval } from 'sim/trial/hold-rate'
+import { wilsonInterval } from 'sim/trial/hold-rate'
 import type { TrialRequest } from 'sim/trial/types'
 import { Problem } from '~/server/problem'
 import { PoolFull, PoolTimeout } from '~/server/simulate/pool'
@@ -12,7 +12,7 @@ export async function simulate(body: unknown, signal: AbortSignal): Promise<Simu
   const { result, held } = await computed(request, seeds, signal)
   const { boat, setup } = request.plan
   const { metrics, ...measurements } = measurementsOf(result)
-  const holdRate = { held, of: seeds, interval: holdInterval(held, seeds) }
+  const holdRate = { held, of: seeds, interval: wilsonInterval(held, seeds) }
   return {
     modelVersion: result.modelVersion,
     setup: {

@@ -1,12 +1,12 @@
 import { getBoat } from '~/features/boats/queries.server'
-import { answer, methodNotAllowed, Problem } from '~/server/problem'
+import { Problem } from '~/server/problem'
+import { notWritable, readable } from '~/server/resource'
 import type { Route } from './+types/boat'
 
-export const loader = ({ params }: Route.LoaderArgs) =>
-  answer(async () => {
-    const boat = await getBoat(params.id)
-    if (!boat) throw new Problem(404, 'There is no such boat; /api/boats lists them.')
-    return Response.json(boat)
-  })
+export const loader = readable(async ({ params }: Route.LoaderArgs) => {
+  const boat = await getBoat(params.id)
+  if (!boat) throw new Problem(404, 'There is no such boat; /api/boats lists them.')
+  return Response.json(boat)
+})
 
-export const action = methodNotAllowed('GET, HEAD')
+export const action = notWritable

@@ -1,6 +1,6 @@
 import { listBoats } from '~/features/boats/queries.server'
-import { answer, methodNotAllowed } from '~/server/problem'
+import { notWritable, readable } from '~/server/resource'
 
-export const loader = () => answer(async () => Response.json(await listBoats()))
+export const loader = readable(async () => Response.json(await listBoats()))
 
-export const action = methodNotAllowed('GET, HEAD')
+export const action = notWritable

@@ -1,12 +1,12 @@
 import { healthOf } from '~/features/health/health.server'
-import { methodNotAllowed } from '~/server/problem'
+import { notWritable, readable } from '~/server/resource'
 
-export const loader = async () => {
+export const loader = readable(async () => {
   const health = await healthOf()
   return Response.json(health, {
     status: health.database === 'reachable' ? 200 : 503,
     headers: { 'cache-control': 'no-store' },
   })
-}
+})
 
-export const action = methodNotAllowed('GET, HEAD')
+export const action = notWritable

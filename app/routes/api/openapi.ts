@@ -1,6 +1,6 @@
 import { openApiDocument } from '~/features/openapi/document.server'
-import { methodNotAllowed } from '~/server/problem'
+import { notWritable, readable } from '~/server/resource'
 
-export const loader = () => Response.json(openApiDocument)
+export const loader = readable(() => Response.json(openApiDocument))
 
-export const action = methodNotAllowed('GET, HEAD')
+export const action = notWritable

@@ -1,6 +1,6 @@
 import { listSetups } from '~/features/setups/queries.server'
-import { answer, methodNotAllowed } from '~/server/problem'
+import { notWritable, readable } from '~/server/resource'
 
-export const loader = () => answer(async () => Response.json(await listSetups()))
+export const loader = readable(async () => Response.json(await listSetups()))
 
-export const action = methodNotAllowed('GET, HEAD')
+export const action = notWritable
