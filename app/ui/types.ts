@@ -1,3 +1,6 @@
+/** What was typed into a box, read as a number in the stored unit. */
+export type Entry = { ok: true; value: number } | { ok: false; message: string }
+
 /** Slider and exact box of one quantity; values are in the stored unit throughout. */
 export interface NumberSliderProps {
   /** The sailor's words, e.g. 'Hitch, from the deck block'. */
@@ -12,8 +15,9 @@ export interface NumberSliderProps {
   step: number
   /** The number alone, in the unit shown. */
   format: (value: number) => string
-  /** Stored value of what was typed, units understood; null when it is no number. */
-  parse: (text: string) => number | null
+  /** Stored value of what was typed, units understood (their tables are fetched when first
+   * needed), or the sentence that says what is wrong with it. */
+  parse: (text: string) => Promise<Entry>
   /** While dragging: many times. */
   onInput: (value: number) => void
   /** Once per drag, key press or entry: one step to undo. */

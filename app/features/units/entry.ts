@@ -1,8 +1,6 @@
 import type { StoredUnit } from 'sim/parameters/define'
+import type { Entry } from '~/ui/types'
 import type { ShownUnit } from './units'
-
-/** What was typed into a box, as a value in the stored unit, or what is wrong with it. */
-export type Entry = { ok: true; value: number } | { ok: false; message: string }
 
 export interface Term {
   amount: number

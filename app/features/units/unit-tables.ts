@@ -1,6 +1,7 @@
 import { create, createUnitDependencies, unitDependencies } from 'mathjs'
 import type { StoredUnit } from 'sim/parameters/define'
-import type { Entry, Term } from './entry'
+import type { Entry } from '~/ui/types'
+import type { Term } from './entry'
 
 const tables = create({ unitDependencies, createUnitDependencies })
 tables.createUnit('knot', '0.514444444444444444 m/s')

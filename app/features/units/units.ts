@@ -76,6 +76,36 @@ export function shownUnit(unit: StoredUnit, units: Units, step = 1): ShownUnit {
   }
 }
 
+const spoken: Record<string, string> = {
+  kn: 'knots',
+  'm/s': 'metres a second',
+  cm: 'centimetres',
+  mm: 'millimetres',
+  m: 'metres',
+  in: 'inches',
+  ft: 'feet',
+  'm²': 'square metres',
+  'ft²': 'square feet',
+  kg: 'kilograms',
+  lb: 'pounds',
+  'kg m²': 'kilogram square metres',
+  N: 'newtons',
+  kgf: 'kilograms-force',
+  lbf: 'pounds-force',
+  'N m': 'newton metres',
+  'kgf m': 'kilogram-force metres',
+  'lbf ft': 'pound-force feet',
+  '°': 'degrees',
+  s: 'seconds',
+  MPa: 'megapascals',
+  '%': 'per cent',
+}
+
+/** A unit as it is read aloud. */
+export function spokenUnit(unit: string): string {
+  return spoken[unit] ?? unit
+}
+
 /** A number and its unit, apart, so that a page can set the unit smaller. */
 export interface Reading {
   readonly figure: string
