@@ -24,10 +24,7 @@ export interface RigGeometry {
 }
 
 /** What of a moment moves the rope and the timber. */
-export type RigMoment = Pick<
-  Moment,
-  'boomDeg' | 'tillerDeg' | 'hitchOutM' | 'elasticStretchM'
->
+export type RigMoment = Pick<Moment, 'boomDeg' | 'tillerDeg' | 'hitchOutM' | 'elasticStretchM'>
 
 /** Boom block or clew, with the clew to starboard at positive angles. */
 export function clewPoint(sail: Sail, boomDeg: number, reach: number): DeckPoint {
@@ -40,13 +37,17 @@ export function boomAngle(moment: Pick<Moment, 'boomDeg'>, sailId: string): numb
   return moment.boomDeg[sailId] ?? 0
 }
 
-/** Deck block of a sheet; a sail held to windward has its sheet led to windward. */
+/** Side on which a sail is sheeted, 1 to starboard: to leeward, unless it is held to windward. */
+export function sheetSide(plan: Plan, sailId: string): Tack {
+  const tack = tackOf(plan.setup.conditions)
+  const held = plan.setup.trim[sailId]?.held
+  return held === 'pole' || held === 'backed' ? tack : tack === 1 ? -1 : 1
+}
+
 export function sheetLead(plan: Plan, sailId: string): DeckPoint | undefined {
   const sail = plan.boat.sails[sailId]
   if (!sail) return undefined
-  const held = plan.setup.trim[sailId]?.held
-  const leeward = held === 'pole' || held === 'backed' ? 1 : -1
-  return { x: sail.sheetX, y: leeward * tackOf(plan.setup.conditions) * sail.sheetY, z: sail.sheetZ }
+  return { x: sail.sheetX, y: sheetSide(plan, sailId) * sail.sheetY, z: sail.sheetZ }
 }
 
 function tillerPoint(plan: Plan, tillerDeg: number, radius: number): DeckPoint {

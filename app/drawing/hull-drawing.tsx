@@ -1,6 +1,6 @@
-import type { Boat, HardwarePoint } from 'sim/plan/types'
 import { memo } from 'react'
-import { deckPath, onPaper, type Point, tenth } from './frame'
+import type { Boat, HardwarePoint } from 'sim/plan/types'
+import { clamp, deckPath, onPaper, type Point, tenth } from './frame'
 import { type Cubic, type HullOutline, halfBreadthAt, hullOutline, mastX } from './hull-outline'
 
 interface HullDrawingProps {
@@ -87,7 +87,7 @@ export const HullDrawing = memo(function HullDrawing({ boat, scale }: HullDrawin
         className="stroke-ink-pale"
         transform={`translate(0 ${tenth(middle.y * (1 - 0.985))}) scale(${rail} 0.985)`}
       />
-      <path d={trunkPath(roof, scale, 0.5)} strokeWidth={1} className="fill-cloth stroke-ink-soft" />
+      <path d={trunkPath(roof, scale, 0.5)} strokeWidth={1} className="fill-deck stroke-ink-soft" />
       <path
         d={box(cockpit.aftX, cockpit.foreX, cockpit.aftHalf, cockpit.foreHalf, scale)}
         strokeWidth={1}
@@ -156,7 +156,7 @@ function Sidelights({ outline, scale }: { outline: HullOutline; scale: number })
 
 function Fitting({ point, scale }: { point: HardwarePoint; scale: number }) {
   const { x, y } = onPaper(point, scale)
-  const size = Math.max(1.4, 0.05 * scale)
+  const size = clamp(0.045 * scale, 1.4, 4)
   const at = `translate(${tenth(x)} ${tenth(y)})`
   switch (point.kind) {
     case 'winch':
@@ -185,7 +185,9 @@ function Fitting({ point, scale }: { point: HardwarePoint; scale: number }) {
         />
       )
     case 'block':
-      return <circle r={size} transform={at} strokeWidth={1} className="fill-cloth stroke-ink-soft" />
+      return (
+        <circle r={size} transform={at} strokeWidth={1} className="fill-cloth stroke-ink-soft" />
+      )
     default:
       return <circle r={size * 0.7} transform={at} className="fill-ink-soft stroke-none" />
   }

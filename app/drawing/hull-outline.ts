@@ -94,7 +94,12 @@ export function hullOutline(boat: Boat): HullOutline {
       aftHalf: 0.66 * transomHalf,
       foreHalf: 0.56 * halfBeam,
     },
-    roof: { aftX: cockpitFore, foreX: roofFore, aftHalf: 0.64 * halfBeam, foreHalf: 0.36 * halfBeam },
+    roof: {
+      aftX: cockpitFore,
+      foreX: roofFore,
+      aftHalf: 0.64 * halfBeam,
+      foreHalf: 0.36 * halfBeam,
+    },
     hatch: { x: (roofFore + bowX) / 2 - 0.06 * lengthOverall, half: 0.28 },
   }
 }

@@ -98,8 +98,7 @@ function section(
   for (let index = 0; index < pointsPerSection; index++) {
     const along = index / (pointsPerSection - 1)
     const belly = 4 * along * (1 - along) * (1 + 0.45 * (1 - 2 * along)) * fullness
-    const ripple =
-      0.075 * flogging * along * Math.sin(2 * Math.PI * (2.2 * along - 1.1 * timeS))
+    const ripple = 0.075 * flogging * along * Math.sin(2 * Math.PI * (2.2 * along - 1.1 * timeS))
     const out = (belly + ripple) * chord
     points.push({
       x: luff.x - aft.x * chord * along - aft.y * out,

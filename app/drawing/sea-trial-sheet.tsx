@@ -1,0 +1,297 @@
+import { WindArrow } from './arrows'
+import { Balloon } from './balloon'
+import { detailFrame } from './detail-frame'
+import { clamp, onPaper, radians, tackOf, tenth } from './frame'
+import { rigGeometry, sheetLead } from './geometry'
+import { HullDrawing } from './hull-drawing'
+import { momentAt } from './moment'
+import { partNumber, partsOf } from './parts'
+import { ControlLine, ElasticCord, Sheet } from './rope'
+import { Mast, SailDrawing } from './sail-drawing'
+import { sailShape } from './sail-shape'
+import { ScaleBar } from './scale-bar'
+import { RudderBlade, Tiller } from './tiller-drawing'
+import type { Anchor, Run, SeaTrialSheetProps } from './types'
+import { Wake, Waves, windSwingDeg } from './water'
+import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
+
+export const ghostDash = { lashed: '7 4', free: '2 4' } as const
+
+/** Room over the ring for the true wind. */
+const top = 88
+
+/** Pixels of arrow per knot, the same for true and apparent wind. */
+function arrowScale(run: Run): number {
+  return clamp(50 / run.request.conditions.trueWindSpeedKn, 2.2, 5.2)
+}
+
+/** The sea trial: the wind from the top, the boat at her course to it, to scale. */
+export function SeaTrialSheet(props: SeaTrialSheetProps) {
+  const { run, moment, measures, ghosts = [], label, water = 'running', width, height } = props
+  const { plan } = run.request
+  const { hull } = plan.boat
+  const radius = Math.round(Math.min(width / 2 - (width < 600 ? 58 : 76), (height - top - 40) / 2))
+  const centre = { x: Math.round(width / 2), y: top + radius }
+  const ring = { centre, radius }
+  const scale = (1.3 * radius) / hull.lengthOverall
+  const midships = hull.bowX - hull.lengthOverall / 2
+  const turn = -moment.courseToWindDeg
+  const onSheet = (point: Anchor): Anchor => turned(point, turn, centre, midships * scale)
+  const gravityAt = onSheet(onPaper({ x: hull.centreOfGravityX, y: 0 }, scale))
+
+  return (
+    <svg
+      viewBox={`0 0 ${width} ${height}`}
+      role="img"
+      aria-label={label}
+      className="block h-full w-full overflow-hidden"
+    >
+      <Waves
+        run={run}
+        moment={moment}
+        scale={scale}
+        running={water === 'running'}
+        width={width}
+        height={height}
+      />
+      <BandSector ring={ring} band={run.result.band} />
+      <RingGraduation centre={centre} radius={radius} />
+      <RingFigures ring={ring} courseDeg={moment.courseToWindDeg} format={measures.angle.format} />
+      <Wake
+        run={run}
+        moment={moment}
+        scale={scale}
+        at={gravityAt}
+        sternPx={(hull.centreOfGravityX - hull.bowX + hull.lengthOverall) * scale + 4}
+      />
+      {ghosts.map((ghost, place) => (
+        <GhostPointer
+          key={ghost.helm}
+          ring={ring}
+          courseDeg={momentAt(ghost.run, moment.timeS).courseToWindDeg}
+          label={ghost.label}
+          dash={ghostDash[ghost.helm]}
+          place={place}
+        />
+      ))}
+      <CoursePointer
+        ring={ring}
+        courseDeg={moment.courseToWindDeg}
+        text={`${measures.angle.format(Math.abs(moment.courseToWindDeg))}°`}
+        from={(hull.lengthOverall / 2) * scale + 6}
+      />
+      <g
+        transform={`translate(${centre.x} ${centre.y}) rotate(${tenth(turn)}) translate(0 ${tenth(midships * scale)})`}
+      >
+        <HullDrawing boat={plan.boat} scale={scale} />
+        <Rigging {...props} scale={scale} />
+      </g>
+      <DetailRing {...props} scale={scale} onSheet={onSheet} />
+      <SailNumbers {...props} scale={scale} onSheet={onSheet} />
+      <ApparentWind {...props} scale={scale} onSheet={onSheet} turn={turn} />
+      <TrueWind {...props} centre={centre} radius={radius} />
+      <ScaleBar x={16} y={height - 14} scale={scale} measure={measures.length} room={width / 4} />
+    </svg>
+  )
+}
+
+/** From the boat's own paper, bow up and stock at the origin, to the sheet. */
+function turned(point: Anchor, turnDeg: number, centre: Anchor, midshipsPx: number): Anchor {
+  const [sin, cos] = [Math.sin(radians(turnDeg)), Math.cos(radians(turnDeg))]
+  const y = point.y + midshipsPx
+  return { x: centre.x + point.x * cos - y * sin, y: centre.y + point.x * sin + y * cos }
+}
+
+interface PlacedProps extends SeaTrialSheetProps {
+  scale: number
+  onSheet: (point: Anchor) => Anchor
+}
+
+/** Everything rigged that moves, from the deck upwards. */
+function Rigging({ run, moment, scale }: SeaTrialSheetProps & { scale: number }) {
+  const { plan } = run.request
+  const rig = rigGeometry(plan, moment)
+  const paper = (point: { x: number; y: number }) => onPaper(point, scale)
+  const sails = Object.entries(plan.boat.sails).sort(([, a], [, b]) => b.luffX - a.luffX)
+  return (
+    <>
+      {rig && <RudderBlade boat={plan.boat} rig={rig} scale={scale} />}
+      {sails.map(([id, sail]) => {
+        const deck = sheetLead(plan, id)
+        const shape = sailShape(plan, id, moment)
+        if (!deck || !shape || id === plan.setup.source || moment.boomDeg[id] === undefined)
+          return null
+        const boom = shape.boom
+          ? alongBoom(shape.boom, sail.sheetReach / sail.footLength)
+          : shape.clew
+        return (
+          <Sheet
+            key={id}
+            deck={paper(deck)}
+            boom={paper(boom)}
+            parts={sail.sheetParts}
+            tensionN={90}
+            slack={(moment.drawing[id] ?? 0) < 0.05}
+            gap={2}
+          />
+        )
+      })}
+      {rig && (
+        <>
+          <Sheet
+            deck={paper(rig.sheetDeck)}
+            boom={paper(rig.sheetBoom)}
+            hitch={plan.setup.line.pull === 'deflected' ? paper(rig.hitch) : undefined}
+            parts={plan.boat.sails[plan.setup.source]?.sheetParts ?? 1}
+            tensionN={moment.sheetN}
+            slack={moment.sheetN < 2}
+            gap={2}
+          />
+          <Tiller boat={plan.boat} rig={rig} scale={scale} />
+          <ElasticCord
+            anchor={paper(rig.elasticAnchor)}
+            cordFrom={paper(rig.cordFrom)}
+            tiller={paper(rig.tillerElastic)}
+            tensionN={moment.elasticN}
+            naturalPx={plan.setup.elastic.naturalLength * scale}
+            radius={3.2}
+          />
+          <ControlLine points={rig.line.map(paper)} tensionN={moment.controlLineN} />
+        </>
+      )}
+      {sails.map(([id]) => {
+        const shape = moment.boomDeg[id] === undefined ? undefined : sailShape(plan, id, moment)
+        return shape && <SailDrawing key={id} shape={shape} scale={scale} />
+      })}
+      {sails
+        .filter(([, sail]) => sail.kind === 'main' || sail.kind === 'mizzen')
+        .map(([id, sail]) => (
+          <Mast key={id} x={sail.luffX} scale={scale} />
+        ))}
+    </>
+  )
+}
+
+function alongBoom(
+  boom: readonly [{ x: number; y: number }, { x: number; y: number }],
+  part: number,
+) {
+  const [gooseneck, end] = boom
+  const share = part / 1.05
+  return {
+    x: gooseneck.x + (end.x - gooseneck.x) * share,
+    y: gooseneck.y + (end.y - gooseneck.y) * share,
+  }
+}
+
+/** The ring round what the detail shows. */
+function DetailRing({ run, scale, onSheet }: PlacedProps) {
+  const frame = detailFrame(run.request.plan)
+  const at = onSheet(onPaper(frame.centre, scale))
+  const radius = frame.radiusM * scale
+  const away = tackOf(run.request.plan.setup.conditions) * -0.72
+  const edge = {
+    x: frame.centre.x - 0.69 * (frame.radiusM + 14 / scale),
+    y: frame.centre.y + away * (frame.radiusM + 14 / scale),
+  }
+  const letter = onSheet(onPaper(edge, scale))
+  return (
+    <g className="fill-none stroke-ink-soft">
+      <circle
+        cx={tenth(at.x)}
+        cy={tenth(at.y)}
+        r={tenth(radius)}
+        strokeWidth={1}
+        strokeDasharray="10 3 2 3"
+      />
+      <text
+        x={tenth(letter.x)}
+        y={tenth(letter.y + 5)}
+        textAnchor="middle"
+        className="fill-ink stroke-paper [paint-order:stroke]"
+        strokeWidth={4}
+        style={{ fontWeight: 600 }}
+      >
+        A
+      </text>
+    </g>
+  )
+}
+
+/** Circled numbers of the sails, to leeward of each. */
+function SailNumbers({ run, moment, scale, onSheet }: PlacedProps) {
+  const { plan } = run.request
+  const parts = partsOf(plan)
+  return parts.map((part) => {
+    if (!part.key.startsWith('sail.')) return null
+    const id = part.key.slice('sail.'.length)
+    const foot = sailShape(plan, id, moment)?.sections[0]
+    const middle = foot?.[7]
+    if (!middle) return null
+    const side = (moment.boomDeg[id] ?? 0) < 0 ? -1 : 1
+    const at = { x: middle.x + 0.1, y: middle.y + side * (30 / scale) }
+    return (
+      <Balloon
+        key={part.key}
+        part={onSheet(onPaper(middle, scale))}
+        at={onSheet(onPaper(at, scale))}
+        text={String(partNumber(parts, part.key) ?? '')}
+      />
+    )
+  })
+}
+
+function ApparentWind(props: PlacedProps & { turn: number }) {
+  const { run, moment, measures, scale, onSheet, turn } = props
+  const { boat } = run.request.plan
+  const luffs = Object.values(boat.sails)
+    .filter((sail) => sail.kind === 'main')
+    .map((sail) => sail.luffX)
+  const mast = onSheet(onPaper({ x: Math.max(0, ...luffs), y: 0 }, scale))
+  const fromDeg = turn + moment.apparentWindAngleDeg
+  const length = clamp(moment.apparentWindSpeedKn * arrowScale(run), 14, 130)
+  const away = { x: Math.sin(radians(fromDeg)), y: -Math.cos(radians(fromDeg)) }
+  const tip = { x: mast.x + away.x * 7, y: mast.y + away.y * 7 }
+  const tail = { x: tip.x + away.x * (length + 12), y: tip.y + away.y * (length + 12) }
+  return (
+    <g>
+      <WindArrow tipX={tip.x} tipY={tip.y} fromDeg={fromDeg} length={length} kind="apparent" />
+      <text
+        x={tenth(tail.x)}
+        y={tenth(tail.y + 5)}
+        textAnchor={Math.abs(away.x) < 0.5 ? 'middle' : away.x > 0 ? 'start' : 'end'}
+        className="fill-ink-soft stroke-paper [paint-order:stroke]"
+        strokeWidth={4}
+      >
+        {`${measures.windSpeed.format(moment.apparentWindSpeedKn)} ${measures.windSpeed.unit}`}
+      </text>
+    </g>
+  )
+}
+
+interface TrueWindProps extends SeaTrialSheetProps {
+  centre: Anchor
+  radius: number
+}
+
+/** At the top of the ring; it leans as the wind of the moment swings about the mean. */
+function TrueWind({ run, moment, measures, centre, radius }: TrueWindProps) {
+  const length = clamp(moment.windSpeedKn * arrowScale(run), 16, top - 20)
+  return (
+    <g>
+      <WindArrow
+        tipX={centre.x}
+        tipY={centre.y - radius - 14}
+        fromDeg={windSwingDeg(moment)}
+        length={length}
+        kind="true"
+      />
+      <text x={centre.x + 26} y={28} style={{ fontWeight: 600 }}>
+        {`${measures.windSpeed.format(moment.windSpeedKn)} `}
+        <tspan className="fill-ink-soft" style={{ fontWeight: 400 }}>
+          {measures.windSpeed.unit}, true wind
+        </tspan>
+      </text>
+    </g>
+  )
+}

@@ -1,0 +1,331 @@
+import { useId } from 'react'
+import { Balloon } from './balloon'
+import { type DetailFrame, detailFrame } from './detail-frame'
+import { DeckBlock, HitchTurns, LeadSymbol, MadeFast } from './fittings'
+import { direction, onPaper, type Point, polyline, tenth } from './frame'
+import { type RigGeometry, rigGeometry, tillerAngles } from './geometry'
+import { HullDrawing } from './hull-drawing'
+import { partNumber, partsOf } from './parts'
+import { ControlLine, ElasticCord, Sheet } from './rope'
+import { ScaleBar } from './scale-bar'
+import { RudderBlade, Tiller } from './tiller-drawing'
+import type { Anchor, PartAnchors, PartKey, Size, TillerDetailProps } from './types'
+
+interface DetailView {
+  frame: DetailFrame
+  scale: number
+  /** Centre of the ring. */
+  centre: Anchor
+  radius: number
+  /** From the deck to the drawing. */
+  place: (point: Point) => Anchor
+}
+
+/** Room under the ring for the scale bar and the letter. */
+const footPx = 34
+/** Room over the ring, so that the pulls stand clear of it. */
+const headPx = 16
+
+function detailView(plan: TillerDetailProps['plan'], size: Size): DetailView {
+  const frame = detailFrame(plan)
+  const radius = Math.min(size.width / 2 - 2, (size.height - footPx - headPx) / 2)
+  const scale = radius / frame.radiusM
+  const centre = { x: size.width / 2, y: headPx + radius }
+  const origin = onPaper(frame.centre, scale)
+  return {
+    frame,
+    scale,
+    centre,
+    radius,
+    place: (point) => {
+      const at = onPaper(point, scale)
+      return { x: centre.x + at.x - origin.x, y: centre.y + at.y - origin.y }
+    },
+  }
+}
+
+/** Where each part lies in the detail, for notes with leader lines. */
+export function partAnchors(
+  props: Pick<TillerDetailProps, 'plan' | 'moment' | 'width' | 'height'>,
+): PartAnchors {
+  const { plan, moment } = props
+  const rig = rigGeometry(plan, moment)
+  if (!rig) return {}
+  const { place, centre, radius } = detailView(plan, props)
+  const within = (point: Point) => pulledWithin(place(point), centre, radius - 8)
+  const middle = (a: Point, b: Point) => ({ x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 })
+  const anchors: Partial<Record<PartKey, Anchor>> = {
+    sheet: within(middle(rig.hitch, rig.sheetBoom)),
+    line: within(middle(rig.line[0] ?? rig.hitch, rig.line[1] ?? rig.tillerLine)),
+    tiller: within(rig.tillerTip),
+    'tiller-line': within(rig.tillerLine),
+    'tiller-elastic': within(rig.tillerElastic),
+    elastic: within(middle(rig.cordFrom, rig.tillerElastic)),
+    'elastic-anchor': within(rig.elasticAnchor),
+    [`reef.${plan.setup.source}`]: within(rig.sheetBoom),
+  }
+  if (plan.setup.line.pull === 'deflected') anchors.hitch = within(rig.hitch)
+  rig.leads.forEach((lead, index) => {
+    anchors[`lead.${index}`] = within(lead)
+  })
+  return anchors
+}
+
+function pulledWithin(point: Anchor, centre: Anchor, radius: number): Anchor {
+  const [dx, dy] = [point.x - centre.x, point.y - centre.y]
+  const part = Math.min(1, radius / (Math.hypot(dx, dy) || 1))
+  return { x: tenth(centre.x + dx * part), y: tenth(centre.y + dy * part) }
+}
+
+/** Degrees clockwise from the top of the paper in which one point lies from another. */
+function bearing(from: Anchor, to: Anchor): number {
+  return (Math.atan2(to.x - from.x, from.y - to.y) * 180) / Math.PI
+}
+
+/** Detail A: tiller, leads, hitch and elastic, bow up. */
+export function TillerDetail(props: TillerDetailProps) {
+  const { plan, moment, measures, width, height, label, active = null } = props
+  const clip = useId()
+  const rig = rigGeometry(plan, moment)
+  const view = detailView(plan, props)
+  const { centre, radius, scale, place } = view
+  const stock = place({ x: 0, y: 0 })
+  return (
+    <svg
+      viewBox={`0 0 ${width} ${height}`}
+      role="img"
+      aria-label={label}
+      className="block h-full w-full"
+    >
+      <clipPath id={clip}>
+        <circle cx={centre.x} cy={centre.y} r={radius} />
+      </clipPath>
+      <g clipPath={`url(#${clip})`}>
+        <g transform={`translate(${tenth(stock.x)} ${tenth(stock.y)})`}>
+          <HullDrawing boat={plan.boat} scale={scale} />
+          {rig && <RudderBlade boat={plan.boat} rig={rig} scale={scale} />}
+          <TillerSweep
+            radiusPx={plan.boat.tiller.length * scale}
+            stopDeg={plan.boat.rudder.stopDeg}
+          />
+        </g>
+        {rig && <Gear {...props} rig={rig} view={view} active={active} />}
+      </g>
+      <circle
+        cx={centre.x}
+        cy={centre.y}
+        r={radius}
+        className="fill-none stroke-ink-soft"
+        strokeWidth={1}
+        strokeDasharray="10 3 2 3"
+      />
+      {rig && <Pulls {...props} rig={rig} />}
+      <text x={width - 2} y={height - 4} textAnchor="end">
+        <tspan style={{ fontWeight: 600 }}>A</tspan>
+        <tspan className="fill-ink-soft">, bow up</tspan>
+      </text>
+      <ScaleBar x={2} y={height - 5} scale={scale} measure={measures.length} room={width / 3} />
+    </svg>
+  )
+}
+
+interface GearProps extends TillerDetailProps {
+  rig: RigGeometry
+  view: DetailView
+}
+
+/** Rope, timber and fittings, with their numbers. */
+function Gear({ plan, moment, rig, view, active }: GearProps) {
+  const { place, scale } = view
+  const deflected = plan.setup.line.pull === 'deflected'
+  const line = rig.line.map(place)
+  const deck = place(rig.sheetDeck)
+  const boom = place(rig.sheetBoom)
+  const stock = place(rig.stock)
+  return (
+    <>
+      <Sheet
+        deck={deck}
+        boom={boom}
+        hitch={deflected ? place(rig.hitch) : undefined}
+        parts={plan.boat.sails[plan.setup.source]?.sheetParts ?? 1}
+        tensionN={moment.sheetN}
+        slack={moment.sheetN < 2}
+        gap={4.5}
+        thin={1.4}
+        thick={3.6}
+      />
+      {deflected && (
+        <path
+          d={polyline([deck, place(rig.hitchAtRest), boom])}
+          className="fill-none stroke-ink-soft"
+          strokeWidth={0.9}
+          strokeDasharray="2 4"
+        />
+      )}
+      <g transform={`translate(${tenth(stock.x)} ${tenth(stock.y)})`}>
+        <Tiller boat={plan.boat} rig={rig} scale={scale} />
+      </g>
+      <Square rig={rig} place={place} />
+      <ElasticCord
+        anchor={place(rig.elasticAnchor)}
+        cordFrom={place(rig.cordFrom)}
+        tiller={place(rig.tillerElastic)}
+        tensionN={moment.elasticN}
+        naturalPx={plan.setup.elastic.naturalLength * scale}
+        radius={7}
+        width={active === 'elastic' ? 2.8 : 2}
+      />
+      <ControlLine
+        points={line}
+        tensionN={moment.controlLineN}
+        thin={active === 'line' ? 3.4 : 2.4}
+        thick={6}
+      />
+      <DeckBlock at={deck} turnDeg={bearing(deck, boom) + 90} />
+      <MadeFast at={place(rig.elasticAnchor)} strong={active === 'elastic-anchor'} />
+      {rig.leads.map((lead, index) => {
+        const at = place(lead)
+        const before = line[index] ?? at
+        const after = line[index + 2] ?? at
+        return (
+          <LeadSymbol
+            // biome-ignore lint/suspicious/noArrayIndexKey: leads have no name but their order
+            key={index}
+            kind={plan.setup.leads[index]?.kind ?? 'ball'}
+            at={at}
+            turnDeg={halfway(bearing(at, before), bearing(at, after))}
+            strong={active === `lead.${index}`}
+          />
+        )
+      })}
+      {deflected && (
+        <HitchTurns
+          at={place(rig.hitch)}
+          turnDeg={bearing(deck, boom)}
+          strong={active === 'hitch'}
+        />
+      )}
+      <Numbers plan={plan} rig={rig} view={view} active={active ?? null} />
+    </>
+  )
+}
+
+/** Bisector of two bearings, on the side the line turns round. */
+function halfway(a: number, b: number): number {
+  const [first, second] = [direction(a), direction(b)]
+  return (Math.atan2(first.y + second.y, first.x + second.x) * 180) / Math.PI
+}
+
+/** Arc of the tiller's end between its stops, with a tick every ten degrees. */
+function TillerSweep({ radiusPx, stopDeg }: { radiusPx: number; stopDeg: number }) {
+  const at = (angle: number, radius: number) => {
+    const ahead = direction(angle)
+    return `${tenth(radius * ahead.y)} ${tenth(-radius * ahead.x)}`
+  }
+  const tens = Array.from({ length: 13 }, (_, index) => (index - 6) * 10).filter(
+    (angle) => Math.abs(angle) < stopDeg,
+  )
+  const rim = radiusPx * 1.09
+  return (
+    <g className="fill-none stroke-ink-pale" strokeWidth={0.9}>
+      <path d={`M${at(-stopDeg, rim)}A${tenth(rim)} ${tenth(rim)} 0 0 1 ${at(stopDeg, rim)}`} />
+      <path d={tens.map((angle) => `M${at(angle, rim)}L${at(angle, rim + 5)}`).join('')} />
+      <path
+        d={[-stopDeg, stopDeg]
+          .map((angle) => `M${at(angle, rim - 6)}L${at(angle, rim + 9)}`)
+          .join('')}
+        className="stroke-ink"
+        strokeWidth={2.5}
+      />
+    </g>
+  )
+}
+
+/** Squares to the tiller where line and elastic are made fast: the best pull lies along them. */
+function Square({ rig, place }: { rig: RigGeometry; place: DetailView['place'] }) {
+  const length = Math.hypot(rig.tillerTip.x, rig.tillerTip.y) || 1
+  const across = { x: -rig.tillerTip.y / length, y: rig.tillerTip.x / length }
+  const ray = (on: Point, side: number) =>
+    polyline([
+      place(on),
+      place({ x: on.x + across.x * side * 0.4, y: on.y + across.y * side * 0.4 }),
+    ])
+  return (
+    <path
+      d={`${ray(rig.tillerLine, rig.tack)}${ray(rig.tillerElastic, -rig.tack)}`}
+      className="fill-none stroke-ink-soft"
+      strokeWidth={0.9}
+      strokeDasharray="3 3"
+    />
+  )
+}
+
+interface NumbersProps {
+  plan: TillerDetailProps['plan']
+  rig: RigGeometry
+  view: DetailView
+  active: PartKey | null
+}
+
+function Numbers({ plan, rig, view, active }: NumbersProps) {
+  const parts = partsOf(plan)
+  const { place, centre, radius } = view
+  const leeward = -rig.tack
+  const near: [PartKey, Point, number, number][] = [
+    ['sheet', mid(rig.hitch, rig.sheetBoom, 0.35), leeward * 30, -18],
+    ['hitch', rig.hitch, leeward * 8, -30],
+    ['tiller', { x: rig.tillerTip.x * 0.4, y: rig.tillerTip.y * 0.4 }, rig.tack * 34, 10],
+    ['elastic', mid(rig.cordFrom, rig.tillerElastic, 0.4), 0, -32],
+    ['elastic-anchor', rig.elasticAnchor, 0, 28],
+    ['line', mid(rig.line[0] ?? rig.hitch, rig.line[1] ?? rig.tillerLine, 0.5), rig.tack * 10, -30],
+    ...rig.leads.map((lead, index): [PartKey, Point, number, number] => [
+      `lead.${index}`,
+      lead,
+      rig.tack * 28,
+      index ? 16 : -14,
+    ]),
+  ]
+  return near.map(([key, point, dx, dy]) => {
+    const number = partNumber(parts, key)
+    if (number === undefined) return null
+    const part = place(point)
+    const at = pulledWithin({ x: part.x + dx, y: part.y + dy }, centre, radius - 16)
+    return <Balloon key={key} part={part} at={at} text={String(number)} strong={active === key} />
+  })
+}
+
+function mid(a: Point, b: Point, part: number): Point {
+  return { x: a.x + (b.x - a.x) * part, y: a.y + (b.y - a.y) * part }
+}
+
+/** What pulls, and how far from square, in the corners over the ring. */
+function Pulls({ moment, measures, rig, width }: Omit<GearProps, 'view'>) {
+  const angles = tillerAngles(rig)
+  const { force, angle } = measures
+  const line = { name: 'Line', newtons: moment.controlLineN, off: angles.line, ink: 'fill-line' }
+  const elastic = {
+    name: 'Elastic',
+    newtons: moment.elasticN,
+    off: angles.elastic,
+    ink: 'fill-elastic',
+  }
+  const sides = rig.tack === 1 ? [elastic, line] : [line, elastic]
+  return sides.map(({ name, newtons, off, ink }, index) => {
+    const x = index === 0 ? 2 : width - 96
+    return (
+      <g key={name}>
+        <text x={x} y={14} className={ink}>
+          {`${name} `}
+          <tspan className={ink} style={{ fontWeight: 600 }}>
+            {force.format(newtons)}
+          </tspan>
+          {` ${force.unit}`}
+        </text>
+        <text x={x} y={33} className="fill-ink-soft">
+          {`${angle.format(off)}° off square`}
+        </text>
+      </g>
+    )
+  })
+}
