@@ -69,6 +69,7 @@ export class TrialPool {
   }
 
   close(): void {
+    this.#waiting = []
     for (const batch of this.#open) this.#drop(batch, new PoolFault('the threads were closed'))
     for (const worker of this.#idle) worker.terminate()
     this.#idle.clear()
