@@ -2,6 +2,7 @@ import { index, prefix, type RouteConfig, route } from '@react-router/dev/routes
 
 export default [
   index('routes/sea-trial.tsx'),
+  route('preferences', 'routes/preferences.ts'),
   ...prefix('api', [
     route('health', 'routes/api/health.ts'),
     route('boats', 'routes/api/boats.ts'),

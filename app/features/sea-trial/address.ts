@@ -13,14 +13,12 @@ import { trialEventSchema } from 'sim/plan/schema'
 import type { Helm, Plan, TrialEvent } from 'sim/plan/types'
 import type { Solver } from 'sim/trial/types'
 import { MODEL_VERSION } from 'sim/version'
-import { allGhosts, type Ghost, startOf, type TrialState } from './state'
+import { allGhosts, durationsS, type Ghost, MOST_EVENTS, startOf, type TrialState } from './state'
 
 const FORM = '1'
 const BETWEEN = '~'
 const WITHIN = '_'
-const MOST_EVENTS = 20
 
-export const durationsS: readonly number[] = [300, 600, 900, 1200, 1800]
 const helms: readonly Helm[] = ['sheet-to-tiller', 'lashed', 'free']
 const solvers: readonly Solver[] = ['fixed-step', 'adaptive']
 
@@ -116,7 +114,7 @@ interface Draft {
   plan: Plan
   changes: Record<string, Value>
   events: TrialEvent[]
-  rest: Partial<TrialState>
+  rest: { -readonly [Name in keyof TrialState]?: TrialState[Name] }
 }
 
 /** Takes one item into the draft, or says why not. */

@@ -19,6 +19,9 @@ export interface TrialState {
 
 export const allGhosts: readonly Ghost[] = ['lashed', 'free']
 
+/** Lengths of run to choose from. */
+export const durationsS: readonly number[] = [300, 600, 900, 1200, 1800]
+
 export function startOf(setupId: string): TrialState {
   return {
     setupId,
@@ -55,6 +58,9 @@ export type Action =
   | { type: 'redo' }
 
 const REMEMBERED_STEPS = 200
+
+/** More would only crowd the strip and the address. */
+export const MOST_EVENTS = 20
 
 export function opened(state: TrialState): History {
   return { past: [], present: state, future: [], drag: null }
@@ -116,6 +122,7 @@ function after(state: TrialState, action: Edit): TrialState {
     case 'take-all-back':
       return startOf(state.setupId)
     case 'drop':
+      if (state.events.length >= MOST_EVENTS) return state
       return { ...state, events: inOrder([...state.events, action.event]) }
     case 'alter-event':
       if (!state.events[action.index]) return state

@@ -7,13 +7,12 @@ import { describe, expect, test } from 'vitest'
 import {
   changedPlan,
   decode,
-  durationsS,
   encode,
   linkQueryOf,
   queryOf,
   shortName,
 } from '~/features/sea-trial/address'
-import { allGhosts, startOf, type TrialState } from '~/features/sea-trial/state'
+import { allGhosts, durationsS, startOf, type TrialState } from '~/features/sea-trial/state'
 import { plan } from './plan'
 
 const keys = keysOf(plan)

@@ -1,0 +1,162 @@
+import { useMemo, useState } from 'react'
+import { momentAt } from '~/drawing/moment'
+import { SeaTrialSheet } from '~/drawing/sea-trial-sheet'
+import { SternView } from '~/drawing/stern-view'
+import { partAnchors, TillerDetail } from '~/drawing/tiller-detail'
+import type { Ghost, Measures, PartKey, Run, Size } from '~/drawing/types'
+import { useAdjusting } from './adjusting'
+import { adjustable } from './adjustments'
+import { NOTE, type NotePlace, notePlaces } from './note-places'
+import { PartNote } from './notes'
+import type { Playback } from './playback'
+import { useMoment } from './use-playback'
+import { useSize } from './use-size'
+import { courseInWords } from './wording'
+
+interface Props {
+  run: Run
+  ghosts: readonly Ghost[]
+  playback: Playback
+  measures: Measures
+}
+
+/** The boat from above, from astern, and her steering gear with a note on each part. */
+export function Drawings(props: Props) {
+  const sheet = useSize<HTMLDivElement>({ width: 640, height: 520 })
+  return (
+    <>
+      <div ref={sheet.ref} className="sheet relative min-w-0">
+        <FromAbove {...props} size={sheet.size} />
+        <div className="absolute right-0 bottom-0 h-28 w-36 md:h-36 md:w-44">
+          <FromAstern {...props} />
+        </div>
+      </div>
+      <SteeringGear {...props} />
+    </>
+  )
+}
+
+function FromAbove({ run, ghosts, playback, measures, size }: Props & { size: Size }) {
+  const { moment, water } = useMoment(run, playback)
+  const { boat, setup } = run.request.plan
+  const asked = courseInWords(run.request.conditions.trueWindAngleDeg)
+  return (
+    <SeaTrialSheet
+      {...size}
+      run={run}
+      moment={moment}
+      measures={measures}
+      ghosts={ghosts}
+      water={water}
+      label={`${boat.name} from above with the wind from the top of the sheet: ${setup.name}, asked to hold ${asked}`}
+    />
+  )
+}
+
+const sternSize: Size = { width: 176, height: 144 }
+
+function FromAstern({ run, playback, measures }: Props) {
+  const { moment } = useMoment(run, playback)
+  return (
+    <SternView
+      {...sternSize}
+      plan={run.request.plan}
+      moment={moment}
+      measures={measures}
+      label="Heel, seen from astern"
+    />
+  )
+}
+
+function SteeringGear({ run, playback, measures }: Props) {
+  const { plan } = useAdjusting()
+  const [open, setOpen] = useState<PartKey | null>(null)
+  const { ref, size } = useSize<HTMLDivElement>({ width: 400, height: 480 })
+  const { parts } = adjustable(plan)
+  const start = useMemo(() => momentAt(run, 0), [run])
+  const anchors = partAnchors({ plan, moment: start, ...size })
+  const places = notePlaces(
+    parts.map(({ key }) => key),
+    anchors,
+    size,
+  )
+  const sails = parts.filter(({ key }) => key.startsWith('sail.'))
+  return (
+    <section aria-label="Steering gear" className="gear flex min-w-0 flex-col">
+      <div className="relative grid min-h-0 flex-1 grid-cols-1 xl:grid-cols-[11.5rem_1fr_11.5rem]">
+        <div ref={ref} className="min-h-0 min-w-0 xl:col-start-2">
+          <Detail
+            run={run}
+            playback={playback}
+            measures={measures}
+            size={size}
+            places={places}
+            active={open}
+          />
+        </div>
+        <div className="max-xl:hidden">
+          {places.map(({ part: key, side, top }) => {
+            const part = parts.find((other) => other.key === key)
+            if (!part) return null
+            return (
+              <div
+                key={key}
+                className={`absolute ${side === 'left' ? 'right-[calc(100%-11.5rem)]' : 'left-[calc(100%-11.5rem)]'} ${open === key ? 'z-20 w-80 bg-cloth px-3 outline outline-ink' : ''}`}
+                style={{ top, width: open === key ? undefined : NOTE.width }}
+              >
+                <PartNote part={part} open={open === key} onToggle={setOpen} />
+              </div>
+            )
+          })}
+        </div>
+      </div>
+      <div className="max-xl:hidden grid grid-cols-3 gap-4">
+        {sails.map((part) => (
+          <PartNote key={part.key} part={part} open={open === part.key} onToggle={setOpen} />
+        ))}
+      </div>
+    </section>
+  )
+}
+
+interface DetailProps extends Omit<Props, 'ghosts'> {
+  size: Size
+  places: readonly NotePlace[]
+  active: PartKey | null
+}
+
+function Detail({ run, playback, measures, size, places, active }: DetailProps) {
+  const { plan } = useAdjusting()
+  const { moment } = useMoment(run, playback)
+  const anchors = partAnchors({ plan, moment, ...size })
+  return (
+    <div className="relative h-full">
+      <TillerDetail
+        {...size}
+        plan={plan}
+        moment={moment}
+        measures={measures}
+        active={active}
+        label="Detail A: tiller, control line, leads and elastic from above, bow up"
+      />
+      <svg
+        aria-hidden="true"
+        className="pointer-events-none absolute inset-0 h-full w-full overflow-visible max-xl:hidden"
+      >
+        {places.map(({ part, side, top }) => {
+          const at = anchors[part]
+          if (!at) return null
+          const x = side === 'left' ? -4 : size.width + 4
+          return (
+            <path
+              key={part}
+              d={`M${x} ${top + NOTE.height / 2}L${at.x} ${at.y}`}
+              className={active === part ? 'stroke-ink' : 'stroke-ink-pale'}
+              strokeWidth={1}
+            />
+          )
+        })}
+      </svg>
+    </div>
+  )
+}

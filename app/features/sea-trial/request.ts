@@ -1,0 +1,29 @@
+import { problemsOf } from 'sim/plan/problems'
+import type { Plan } from 'sim/plan/types'
+import type { TrialRequest } from 'sim/trial/types'
+import { changedPlan } from './address'
+import type { TrialState } from './state'
+
+/** Fine enough to draw the roll in a short sea smoothly. */
+const OUTPUT_INTERVAL_S = 0.5
+
+/** What a state asks of the model. */
+export function requestOf(state: TrialState, kept: Plan): TrialRequest {
+  const plan = changedPlan(kept, state.changes)
+  return {
+    plan,
+    conditions: plan.setup.conditions,
+    events: [...state.events],
+    helm: state.helm,
+    solver: state.solver,
+    durationS: state.durationS,
+    outputIntervalS: OUTPUT_INTERVAL_S,
+  }
+}
+
+export type Refusals = Readonly<Record<string, string>>
+
+/** Why a request cannot be run, by parameter key; empty when it can. */
+export function refusalsOf({ plan }: TrialRequest): Refusals {
+  return Object.fromEntries(problemsOf(plan).map(({ key, message }) => [key, message]))
+}

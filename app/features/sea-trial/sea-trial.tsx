@@ -1,0 +1,129 @@
+import { useCallback, useMemo, useState } from 'react'
+import type { Plan } from 'sim/plan/types'
+import { usePreferences } from '~/features/preferences/use-preferences'
+import type { SetupEntry } from '~/features/setups/schema'
+import { Masthead } from '~/features/shell/masthead'
+import { queryOf } from './address'
+import { AdjustingProvider } from './adjusting'
+import { AdjustmentList } from './adjustment-list'
+import './sea-trial.css'
+import { Drawings } from './drawings'
+import { EventList } from './event-list'
+import { firstSetup } from './first-setup'
+import { measuresIn } from './measures'
+import { PlayBar } from './play-bar'
+import { Readings } from './readings'
+import { refusalsOf, requestOf } from './request'
+import { RunTools } from './run-tools'
+import { SetupPicker } from './setup-picker'
+import { resultOf, type Sketch } from './sketch'
+import type { TrialState } from './state'
+import { TimeStrip } from './time-strip'
+import { TitleBlock } from './title-block'
+import { Trust } from './trust'
+import { useInView } from './use-in-view'
+import { usePlayback } from './use-playback'
+import { useTrial } from './use-trial'
+import { useTrialState } from './use-trial-state'
+import { Verdict } from './verdict'
+import { Weather } from './weather'
+import { weatherInWords } from './wording'
+
+interface Props {
+  entries: SetupEntry[]
+  plan: Plan
+  state: TrialState
+  remarks: string[]
+  sketch: Sketch
+  sketched: TrialState
+  date: string
+}
+
+export function SeaTrial(opening: Props) {
+  const { entries, date } = opening
+  const units = usePreferences()
+  const measures = useMemo(() => measuresIn(units), [units])
+  const [remarks, setRemarks] = useState(opening.remarks)
+  const { history, state, kept, arrived, dispatch } = useTrialState(
+    {
+      plan: opening.plan,
+      state: opening.state,
+      setupId: firstSetup(entries)?.id ?? opening.plan.setup.id,
+    },
+    setRemarks,
+  )
+
+  const request = useMemo(() => requestOf(state, kept), [state, kept])
+  const refusals = useMemo(() => refusalsOf(request), [request])
+  const runnable = arrived && Object.keys(refusals).length === 0
+  const [first] = useState(() => ({
+    request: requestOf(opening.sketched, opening.plan),
+    result: resultOf(opening.sketch),
+  }))
+  const { run, ghosts, computing, fault } = useTrial(runnable ? request : null, state.ghosts, first)
+  const playback = usePlayback(run.request.durationS)
+  const { ref: titleRef, inView } = useInView<HTMLDivElement>()
+
+  const { plan } = request
+  const adjusting = useMemo(
+    () => ({ kept, plan, units, refusals, dispatch }),
+    [kept, plan, units, refusals, dispatch],
+  )
+  const letGo = useCallback(() => dispatch({ type: 'let-go' }), [dispatch])
+
+  return (
+    <AdjustingProvider value={adjusting}>
+      <Masthead
+        inHand={{
+          boat: plan.boat.name,
+          setup: plan.setup.name,
+          weather: weatherInWords(plan.setup.conditions, units),
+          query: queryOf(state),
+        }}
+      />
+      <main data-computing={computing || undefined} onPointerUp={letGo}>
+        <h1 className="sr-only">Sea trial</h1>
+        {remarks.length > 0 && (
+          <ul role="status" className="border-b border-ink px-4 py-2 text-note md:px-margin">
+            {remarks.map((remark) => (
+              <li key={remark}>{remark}</li>
+            ))}
+          </ul>
+        )}
+        <div className="trial-sheet px-4 pt-3 md:px-margin">
+          <div className="[grid-area:picker]">
+            <SetupPicker
+              entries={entries}
+              setupId={state.setupId}
+              units={units}
+              onChoose={(setupId) => dispatch({ type: 'choose-setup', setupId })}
+            />
+          </div>
+          <Weather />
+          <Drawings run={run} ghosts={ghosts} playback={playback} measures={measures} />
+          <div ref={titleRef} className="verdict">
+            <Verdict run={run} refusals={refusals} fault={fault} />
+          </div>
+          <TimeStrip
+            run={run}
+            ghosts={ghosts}
+            plan={plan}
+            eventCount={state.events.length}
+            playback={playback}
+            measures={measures}
+            dispatch={dispatch}
+          />
+          <div className="title">
+            <TitleBlock run={run} units={units} date={date} />
+          </div>
+        </div>
+        <RunTools history={history} run={run} dispatch={dispatch} />
+        <AdjustmentList />
+        <EventList events={state.events} durationS={state.durationS} />
+        <Readings run={run} playback={playback} measures={measures} />
+        <Trust run={run} state={state} units={units} />
+        <PlayBar playback={playback} verdict={inView ? null : run.result.verdict.text} />
+      </main>
+    </AdjustingProvider>
+  )
+}
