@@ -1,6 +1,6 @@
 import type { Plan } from 'sim/plan/types'
 import { type Point, tackOf } from './frame'
-import { clewPoint, sheetLead, sheetSide } from './geometry'
+import { clewPoint, sheetLead, trimmedAngle } from './geometry'
 
 /** The round piece of deck that the detail shows: the same ring is drawn on the main sheet. */
 export interface DetailFrame {
@@ -13,7 +13,7 @@ const marginM = 0.32
 /** Encloses tiller, leads, hitch and elastic of a setup; it does not move during a run. */
 export function detailFrame(plan: Plan): DetailFrame {
   const tack = tackOf(plan.setup.conditions)
-  const { source, line, elastic, leads, trim } = plan.setup
+  const { source, line, elastic, leads } = plan.setup
   const points: Point[] = [
     { x: -0.25, y: 0 },
     { x: plan.boat.tiller.length, y: 0.3 },
@@ -25,8 +25,7 @@ export function detailFrame(plan: Plan): DetailFrame {
   const sail = plan.boat.sails[source]
   if (deck && sail) {
     points.push(deck)
-    const boomDeg = sheetSide(plan, source) * (trim[source]?.sheetAngleDeg ?? 0)
-    const boom = clewPoint(sail, boomDeg, sail.sheetReach)
+    const boom = clewPoint(sail, trimmedAngle(plan, source), sail.sheetReach)
     const length = Math.hypot(boom.x - deck.x, boom.y - deck.y, boom.z - deck.z) || 1
     const shown = Math.min(1, (line.hitchDistance + 0.25) / length)
     points.push({ x: deck.x + (boom.x - deck.x) * shown, y: deck.y + (boom.y - deck.y) * shown })

@@ -50,6 +50,17 @@ export function sheetLead(plan: Plan, sailId: string): DeckPoint | undefined {
   return { x: sail.sheetX, y: sheetSide(plan, sailId) * sail.sheetY, z: sail.sheetZ }
 }
 
+/** Boom angle at which the sheet of a sail is trimmed to hold it. */
+export function trimmedAngle(plan: Plan, sailId: string): number {
+  return sheetSide(plan, sailId) * (plan.setup.trim[sailId]?.sheetAngleDeg ?? 0)
+}
+
+/** Where the hitch sits on its part, 0 at the deck block, 1 at the boom: made fast as trimmed. */
+function hitchShare(plan: Plan, sail: Sail, deck: DeckPoint): number {
+  const trimmed = clewPoint(sail, trimmedAngle(plan, plan.setup.source), sail.sheetReach)
+  return Math.min(plan.setup.line.hitchDistance / Math.max(distance(deck, trimmed), 0.01), 0.98)
+}
+
 function tillerPoint(plan: Plan, tillerDeg: number, radius: number): DeckPoint {
   const ahead = direction(tillerDeg)
   return { x: radius * ahead.x, y: radius * ahead.y, z: plan.boat.tiller.height }
@@ -69,10 +80,9 @@ export function rigGeometry(plan: Plan, moment: RigMoment): RigGeometry | undefi
   const tillerElastic = tillerPoint(plan, moment.tillerDeg, elastic.tillerRadius)
   const elasticAnchor = { x: elastic.anchorX, y: -tack * elastic.anchorY, z: elastic.anchorZ }
 
-  const part = distance(sheetDeck, sheetBoom)
   const hitchAtRest =
-    line.pull === 'deflected' && part > 0
-      ? between(sheetDeck, sheetBoom, line.hitchDistance / part)
+    line.pull === 'deflected'
+      ? between(sheetDeck, sheetBoom, hitchShare(plan, sail, sheetDeck))
       : sheetDeck
   const towards = leads[0] ?? tillerLine
   const reach = distance(hitchAtRest, towards)

@@ -1,5 +1,5 @@
 import { type Channel, channels } from 'sim/trial/channels'
-import { wrapDegrees } from './frame'
+import { clamp, wrapDegrees } from './frame'
 import type { Moment, Run } from './types'
 
 const channelNames = Object.keys(channels) as Channel[]
@@ -26,12 +26,16 @@ function around(values: Float64Array, index: number, part: number): number {
 
 /** Index of the last sample at or before a moment, and how far on towards the next. */
 export function sampleAt(times: Float64Array, timeS: number): { index: number; part: number } {
-  const first = times[0] ?? 0
-  const last = times.length - 1
-  const interval = last > 0 ? ((times[last] ?? first) - first) / last : 1
-  const place = Math.min(last, Math.max(0, (timeS - first) / interval))
-  const index = Math.min(Math.max(0, last - 1), Math.floor(place))
-  return { index, part: place - index }
+  let low = 0
+  let high = Math.max(0, times.length - 2)
+  while (low < high) {
+    const middle = Math.ceil((low + high) / 2)
+    if ((times[middle] ?? 0) <= timeS) low = middle
+    else high = middle - 1
+  }
+  const from = times[low] ?? 0
+  const interval = (times[low + 1] ?? from) - from
+  return { index: low, part: interval > 0 ? clamp((timeS - from) / interval, 0, 1) : 0 }
 }
 
 /** The moment of a run, between samples too, so that slow playback moves smoothly. */

@@ -3,6 +3,7 @@ import { Balloon } from './balloon'
 import { detailFrame } from './detail-frame'
 import { clamp, onPaper, radians, tackOf, tenth } from './frame'
 import { rigGeometry, sheetLead } from './geometry'
+import { ghostDash } from './ghost-dash'
 import { HullDrawing } from './hull-drawing'
 import { momentAt } from './moment'
 import { partNumber, partsOf } from './parts'
@@ -14,8 +15,6 @@ import { RudderBlade, Tiller } from './tiller-drawing'
 import type { Anchor, Run, SeaTrialSheetProps } from './types'
 import { Wake, Waves, windSwingDeg } from './water'
 import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
-
-export const ghostDash = { lashed: '7 4', free: '2 4' } as const
 
 /** Room over the ring for the true wind. */
 const top = 88

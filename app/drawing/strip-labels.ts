@@ -1,0 +1,68 @@
+import type { Happening } from 'sim/trial/types'
+
+/** Moves labels apart until none is nearer than `gap`, keeping their order and the room given. */
+export function spread(
+  wanted: readonly number[],
+  gap: number,
+  low: number,
+  high: number,
+): number[] {
+  const order = wanted.map((at, index) => ({ at, index })).sort((a, b) => a.at - b.at)
+  let least = low
+  for (const label of order) {
+    label.at = Math.max(label.at, least)
+    least = label.at + gap
+  }
+  let most = high
+  for (const label of order.reverse()) {
+    label.at = Math.min(label.at, most)
+    most = label.at - gap
+  }
+  const placed = [...wanted]
+  for (const { at, index } of order) placed[index] = at
+  return placed
+}
+
+const words: Record<Happening['code'], string> = {
+  gust: 'gust',
+  'wind-shift': 'shift',
+  'wave-set': 'waves',
+  reef: 'reef',
+  tacked: 'tacks',
+  gybed: 'gybes',
+  broached: 'broaches',
+  'line-slack': 'line slack',
+  'elastic-slack': 'elastic slack',
+  'tiller-on-stop': 'tiller on stop',
+  'left-valid-range': 'stops',
+}
+
+export interface Flag {
+  x: number
+  atS: number
+  code: Happening['code']
+  /** Undefined where there is no room for it. */
+  word: string | undefined
+}
+
+/** Average advance of 14 px type, enough to tell whether two words meet. */
+const letterPx = 7.4
+
+/** Flags in order of time, a word on each that has room for it and says something new. */
+export function flagsOf(
+  happenings: readonly Happening[],
+  x: (timeS: number) => number,
+  right: number,
+): Flag[] {
+  let free = Number.NEGATIVE_INFINITY
+  return [...happenings]
+    .sort((a, b) => a.atS - b.atS)
+    .map(({ atS, code }) => {
+      const at = x(atS)
+      const word = words[code]
+      const end = at + 10 + word.length * letterPx
+      const fits = at > free && end < right
+      if (fits) free = end
+      return { x: at, atS, code, word: fits ? word : undefined }
+    })
+}
