@@ -26,7 +26,7 @@ await command(async () => {
   )
   const ended = await Promise.race([untilStopRequested(), server.ended])
   if (ended === undefined) await server.stop()
-  else if (ended !== 0) throw new Trouble(`The server ended by itself with code ${ended}.`)
+  else if (ended !== null) throw new Trouble(`The server was ended by ${ended}.`)
   process.stdout.write('Stopped.\n')
   return 0
 })

@@ -1,4 +1,4 @@
-import { existsSync, readFileSync, writeFileSync } from 'node:fs'
+import { existsSync, readFileSync, statfsSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { logPath, ProgramFailed, run } from './programs.mjs'
 import { root } from './root.mjs'
@@ -6,6 +6,7 @@ import { Trouble } from './trouble.mjs'
 
 /** @typedef {Record<string, { version?: string, integrity?: string, optional?: boolean }>} Packages */
 
+const neededMegabytes = 500
 const modules = join(root, 'node_modules')
 const platformFile = join(modules, '.platform')
 const platform = `node ${process.versions.modules} ${process.platform} ${process.arch}`
@@ -17,6 +18,7 @@ const platform = `node ${process.versions.modules} ${process.platform} ${process
  */
 export async function ensureDependencies(say) {
   if (areInstalled()) return 'as locked'
+  checkSpace(statfsSync(root))
   say('installing from the lock')
   try {
     await run('npm', ['ci', '--include=dev', '--no-audit', '--no-fund'], {
@@ -32,6 +34,19 @@ export async function ensureDependencies(say) {
   }
   writeFileSync(platformFile, platform)
   return 'installed'
+}
+
+/**
+ * npm that runs out of space gives up without a word.
+ * @param {{ bavail: number, bsize: number }} disk
+ */
+export function checkSpace({ bavail, bsize }) {
+  const free = Math.floor((bavail * bsize) / 1e6)
+  if (free >= neededMegabytes) return
+  throw new Trouble(
+    `The disk that holds ${root} is too full: the dependencies take ${neededMegabytes} MB and ` +
+      `${free} MB are free.`,
+  )
 }
 
 function areInstalled() {

@@ -79,7 +79,7 @@ export function prepareDatabase(address, { madeFrom } = {}) {
  * @returns {Promise<typeof import('../../drizzle/prepare')>}
  */
 async function loadPrograms(say) {
-  const { folder } = await ensureBuild('programs', say)
+  const { folder } = await ensureBuild('programs', (what) => say(`${what} what loads it`))
   return import(pathToFileURL(join(folder, 'prepare-database.js')).href)
 }
 

@@ -1,5 +1,6 @@
 import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { processStat } from './processes.mjs'
 import { root } from './root.mjs'
 import { systemCode } from './trouble.mjs'
 
@@ -15,7 +16,7 @@ const fileOf = (/** @type {number} */ pid) => join(folder, `${pid}.json`)
 /** @param {{ usesCluster?: boolean, build?: string }} use that this command now makes */
 export function noteRun({ usesCluster, build }) {
   const earlier = readRun(process.pid)
-  const startedAt = startOf(process.pid) ?? ''
+  const startedAt = processStat(process.pid)?.startedAt ?? ''
   const same = earlier?.startedAt === startedAt ? earlier : { usesCluster: false, builds: [] }
   /** @type {Run} */
   const run = {
@@ -40,7 +41,7 @@ export function liveRuns() {
   const alive = []
   for (const pid of noted()) {
     const run = readRun(pid)
-    if (run && startOf(pid) === run.startedAt) alive.push(run)
+    if (run && processStat(pid)?.startedAt === run.startedAt) alive.push(run)
     else rmSync(fileOf(pid), { force: true })
   }
   return alive
@@ -65,22 +66,6 @@ function readRun(pid) {
     return JSON.parse(readFileSync(fileOf(pid), 'utf8'))
   } catch (error) {
     if (error instanceof SyntaxError || systemCode(error) === 'ENOENT') return null
-    throw error
-  }
-}
-
-/**
- * When a process started, in the kernel's ticks: a number that a later process with the same id
- * does not share.
- * @param {number} pid
- * @returns {string | null} null when there is no such process
- */
-export function startOf(pid) {
-  try {
-    const stat = readFileSync(`/proc/${pid}/stat`, 'utf8')
-    return stat.slice(stat.lastIndexOf(')') + 2).split(' ')[19] ?? null
-  } catch (error) {
-    if (['ENOENT', 'ESRCH'].includes(systemCode(error))) return null
     throw error
   }
 }

@@ -12,8 +12,8 @@ const patienceMs = 8000
  * @typedef {{ listening: number } | { failed: string, code: string }} Report
  * @typedef {object} Server
  * @property {number} port
- * @property {Promise<number>} ended with its exit code
- * @property {() => Promise<number>} stop
+ * @property {Promise<string | null>} ended with what ended it, when that was not a request
+ * @property {() => Promise<void>} stop
  */
 
 /**
@@ -32,13 +32,15 @@ export async function startServer({ folder, host, port, databaseUrl }) {
       BUILD_FOLDER: folder,
     },
   })
-  /** @type {Promise<number>} */
-  const ended = new Promise((resolve) => child.on('exit', (code) => resolve(code ?? 1)))
+  /** @type {Promise<string | null>} */
+  const ended = new Promise((resolve) => {
+    child.on('exit', (code, signal) => resolve(code === 0 ? null : (signal ?? `code ${code}`)))
+  })
   /** @type {Promise<Report>} */
   const reported = new Promise((resolve) => child.once('message', resolve))
   const report = await Promise.race([reported, ended])
-  if (typeof report === 'number') {
-    throw new Trouble(`The server ended with code ${report} before it could serve.`)
+  if (report === null || typeof report === 'string') {
+    throw new Trouble(`The server ended before it could serve${report ? `, by ${report}` : ''}.`)
   }
   if ('failed' in report) {
     await ended
@@ -54,9 +56,8 @@ export async function startServer({ folder, host, port, databaseUrl }) {
     stop: async () => {
       if (child.connected) child.disconnect()
       const tooLong = setTimeout(() => child.kill('SIGKILL'), patienceMs)
-      const code = await ended
+      await ended
       clearTimeout(tooLong)
-      return code
     },
   }
 }

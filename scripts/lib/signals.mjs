@@ -1,3 +1,5 @@
+import { processStat } from './processes.mjs'
+
 const controller = new AbortController()
 
 /** Aborted, with the signal as its reason, once the run was asked to stop. */
@@ -17,13 +19,19 @@ export function listenForSignals() {
 /** npm that was killed outright passes no signal on: its script would go on without it. */
 function stopWithNpm() {
   if (process.env.npm_lifecycle_event === undefined) return
-  const npm = process.ppid
+  const npm = npmAbove()
   const watch = setInterval(() => {
-    if (process.ppid === npm) return
+    if (npmAbove() === npm) return
     clearInterval(watch)
     controller.abort('SIGTERM')
   }, 500)
   watch.unref()
+}
+
+/** The process that started this one, past the shell that npm puts between. */
+function npmAbove() {
+  const parent = processStat(process.ppid)
+  return parent?.name === 'sh' ? parent.parent : process.ppid
 }
 
 /** @returns {Promise<void>} */
