@@ -74,12 +74,15 @@ function courseReading(run: Run, cursorS: number, { angle }: Measures): Reading 
     plot: 'course',
     title: 'Course to the wind',
     atCursor: `${figure(angle, Math.abs(course))} to the wind, ${side}, ${where}.`,
-    overRun: `${spoken(angle, all)}; ${percent(within)} of the judged time within ${figure(angle, band.halfWidthDeg)} of the ${figure(angle, centre)} asked.`,
+    overRun: `${courseRange(angle, all)}; ${percent(within)} of the judged time within ${figure(angle, band.halfWidthDeg)} of the ${figure(angle, centre)} asked.`,
   }
 }
 
-function spoken(measure: Measure, { least, most, mean }: Summary): string {
-  return `From ${figure(measure, least)} to ${figure(measure, most)}, ${figure(measure, mean)} on average`
+/** A boat that went through the wind or round by the stern has no range worth a number. */
+function courseRange(angle: Measure, { least, most, mean }: Summary): string {
+  if (least < 0) return 'Goes through the wind'
+  if (most > 180) return 'Goes round by the stern'
+  return `From ${figure(angle, least)} to ${figure(angle, most)}, ${figure(angle, mean)} on average`
 }
 
 /** An angle with its side in words instead of a sign. */

@@ -1,5 +1,5 @@
 import { memo } from 'react'
-import { deckPath, onPaper, tenth } from './frame'
+import { deckPath, onPaper, type Point, tenth } from './frame'
 import type { SailShape } from './sail-shape'
 
 interface SailDrawingProps {
@@ -55,3 +55,33 @@ export const Mast = memo(function Mast({ x, scale }: { x: number; scale: number 
     />
   )
 })
+
+interface HeldProps {
+  /** From where to where on deck. */
+  from: Point
+  to: Point
+  scale: number
+}
+
+/** A pole from the mast to a clew held to windward. */
+export function Pole({ from, to, scale }: HeldProps) {
+  const path = deckPath([from, to], scale)
+  return (
+    <g className="fill-none stroke-ink" strokeLinecap="round">
+      <path d={path} strokeWidth={3} />
+      <path d={path} strokeWidth={1.2} className="stroke-paper" />
+    </g>
+  )
+}
+
+/** A preventer from the boom to the rail ahead of it. */
+export function Preventer({ from, to, scale }: HeldProps) {
+  return (
+    <path
+      d={deckPath([from, to], scale)}
+      className="fill-none stroke-ink"
+      strokeWidth={1}
+      strokeDasharray="5 2"
+    />
+  )
+}

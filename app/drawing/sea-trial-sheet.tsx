@@ -1,3 +1,4 @@
+import type { Plan } from 'sim/plan/types'
 import { WindArrow } from './arrows'
 import { Balloon } from './balloon'
 import { detailFrame } from './detail-frame'
@@ -5,11 +6,12 @@ import { clamp, onPaper, radians, tackOf, tenth } from './frame'
 import { rigGeometry, sheetLead } from './geometry'
 import { ghostDash } from './ghost-dash'
 import { HullDrawing } from './hull-drawing'
+import { halfBreadthAt, hullOutline, mastX } from './hull-outline'
 import { momentAt } from './moment'
 import { partNumber, partsOf } from './parts'
 import { ControlLine, ElasticCord, Sheet } from './rope'
-import { Mast, SailDrawing } from './sail-drawing'
-import { sailShape } from './sail-shape'
+import { Mast, Pole, Preventer, SailDrawing } from './sail-drawing'
+import { type SailShape, sailShape } from './sail-shape'
 import { ScaleBar } from './scale-bar'
 import { RudderBlade, Tiller } from './tiller-drawing'
 import type { Anchor, Run, SeaTrialSheetProps } from './types'
@@ -17,7 +19,9 @@ import { Wake, Waves, windSwingDeg } from './water'
 import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
 
 /** Room over the ring for the true wind. */
-const top = 88
+function topRoom(width: number): number {
+  return width < 600 ? 66 : 88
+}
 
 /** Pixels of arrow per knot, the same for true and apparent wind. */
 function arrowScale(run: Run): number {
@@ -29,6 +33,7 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
   const { run, moment, measures, ghosts = [], label, water = 'running', width, height } = props
   const { plan } = run.request
   const { hull } = plan.boat
+  const top = topRoom(width)
   const radius = Math.round(Math.min(width / 2 - (width < 600 ? 58 : 76), (height - top - 40) / 2))
   const centre = { x: Math.round(width / 2), y: top + radius }
   const ring = { centre, radius }
@@ -89,6 +94,7 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
       <SailNumbers {...props} scale={scale} onSheet={onSheet} />
       <ApparentWind {...props} scale={scale} onSheet={onSheet} turn={turn} />
       <TrueWind {...props} centre={centre} radius={radius} />
+      <Going {...props} />
       <ScaleBar x={16} y={height - 14} scale={scale} measure={measures.length} room={width / 4} />
     </svg>
   )
@@ -160,7 +166,14 @@ function Rigging({ run, moment, scale }: SeaTrialSheetProps & { scale: number })
       )}
       {sails.map(([id]) => {
         const shape = moment.boomDeg[id] === undefined ? undefined : sailShape(plan, id, moment)
-        return shape && <SailDrawing key={id} shape={shape} scale={scale} />
+        return (
+          shape && (
+            <g key={id}>
+              <SailDrawing shape={shape} scale={scale} />
+              <Held plan={plan} sailId={id} shape={shape} scale={scale} />
+            </g>
+          )
+        )
       })}
       {sails
         .filter(([, sail]) => sail.kind === 'main' || sail.kind === 'mizzen')
@@ -169,6 +182,20 @@ function Rigging({ run, moment, scale }: SeaTrialSheetProps & { scale: number })
         ))}
     </>
   )
+}
+
+/** What holds a sail besides its sheet. */
+function Held(props: { plan: Plan; sailId: string; shape: SailShape; scale: number }) {
+  const { plan, sailId, shape, scale } = props
+  const held = plan.setup.trim[sailId]?.held
+  if (held === 'pole' && !shape.boom)
+    return <Pole from={{ x: mastX(plan.boat), y: 0 }} to={shape.clew} scale={scale} />
+  if (held !== 'preventer' || !shape.boom) return null
+  const from = alongBoom(shape.boom, 0.7)
+  const outline = hullOutline(plan.boat)
+  const x = Math.min(shape.boom[0].x + 1.2, outline.stem.x - 1)
+  const y = Math.sign(from.y || 1) * (halfBreadthAt(outline, x) - 0.08)
+  return <Preventer from={from} to={{ x, y }} scale={scale} />
 }
 
 function alongBoom(
@@ -241,12 +268,9 @@ function SailNumbers({ run, moment, scale, onSheet }: PlacedProps) {
 }
 
 function ApparentWind(props: PlacedProps & { turn: number }) {
-  const { run, moment, measures, scale, onSheet, turn } = props
+  const { run, moment, measures, scale, onSheet, turn, width } = props
   const { boat } = run.request.plan
-  const luffs = Object.values(boat.sails)
-    .filter((sail) => sail.kind === 'main')
-    .map((sail) => sail.luffX)
-  const mast = onSheet(onPaper({ x: Math.max(0, ...luffs), y: 0 }, scale))
+  const mast = onSheet(onPaper({ x: mastX(boat), y: 0 }, scale))
   const fromDeg = turn + moment.apparentWindAngleDeg
   const length = clamp(moment.apparentWindSpeedKn * arrowScale(run), 14, 130)
   const away = { x: Math.sin(radians(fromDeg)), y: -Math.cos(radians(fromDeg)) }
@@ -263,6 +287,7 @@ function ApparentWind(props: PlacedProps & { turn: number }) {
         strokeWidth={4}
       >
         {`${measures.windSpeed.format(moment.apparentWindSpeedKn)} ${measures.windSpeed.unit}`}
+        {width >= 600 && ' apparent'}
       </text>
     </g>
   )
@@ -274,8 +299,8 @@ interface TrueWindProps extends SeaTrialSheetProps {
 }
 
 /** At the top of the ring; it leans as the wind of the moment swings about the mean. */
-function TrueWind({ run, moment, measures, centre, radius }: TrueWindProps) {
-  const length = clamp(moment.windSpeedKn * arrowScale(run), 16, top - 20)
+function TrueWind({ run, moment, measures, centre, radius, width }: TrueWindProps) {
+  const length = clamp(moment.windSpeedKn * arrowScale(run), 16, topRoom(width) - 20)
   return (
     <g>
       <WindArrow
@@ -285,7 +310,13 @@ function TrueWind({ run, moment, measures, centre, radius }: TrueWindProps) {
         length={length}
         kind="true"
       />
-      <text x={centre.x + 26} y={28} style={{ fontWeight: 600 }}>
+      <text
+        x={centre.x + 26}
+        y={28}
+        className="fill-ink stroke-paper [paint-order:stroke]"
+        strokeWidth={4}
+        style={{ fontWeight: 600 }}
+      >
         {`${measures.windSpeed.format(moment.windSpeedKn)} `}
         <tspan className="fill-ink-soft" style={{ fontWeight: 400 }}>
           {measures.windSpeed.unit}, true wind
@@ -293,4 +324,29 @@ function TrueWind({ run, moment, measures, centre, radius }: TrueWindProps) {
       </text>
     </g>
   )
+}
+
+/** Speed and leeway in figures, in the lower right corner. */
+function Going({ moment, measures, width, height }: SeaTrialSheetProps) {
+  const { boatSpeed, angle } = measures
+  const rows = [
+    { name: 'Speed', figure: boatSpeed.format(moment.speedKn), unit: boatSpeed.unit },
+    { name: 'Leeway', figure: angle.format(Math.abs(moment.leewayDeg)), unit: angle.unit },
+  ]
+  return rows.map(({ name, figure, unit }, index) => {
+    const y = height - 34 + 20 * index
+    return (
+      <g key={name} className="stroke-paper [paint-order:stroke]" strokeWidth={4}>
+        <text x={width - 132} y={y} className="fill-ink-soft">
+          {name}
+        </text>
+        <text x={width - 44} y={y} textAnchor="end" style={{ fontWeight: 600 }}>
+          {figure}
+        </text>
+        <text x={unit === '°' ? width - 43 : width - 38} y={y} className="fill-ink-soft">
+          {unit}
+        </text>
+      </g>
+    )
+  })
 }

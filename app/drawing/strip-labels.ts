@@ -60,7 +60,7 @@ export function flagsOf(
     .map(({ atS, code }) => {
       const at = x(atS)
       const word = words[code]
-      const end = at + 10 + word.length * letterPx
+      const end = at + 18 + word.length * letterPx
       const fits = at > free && end < right
       if (fits) free = end
       return { x: at, atS, code, word: fits ? word : undefined }

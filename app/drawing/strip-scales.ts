@@ -36,7 +36,7 @@ export interface StripLayout {
 }
 
 /** Heights of the plots in parts of what is left under their titles. */
-const shares = { course: 0.38, heel: 0.15, tiller: 0.18, loads: 0.29 } as const
+const shares = { course: 0.35, heel: 0.16, tiller: 0.2, loads: 0.29 } as const
 export const titleRow = 19
 export const flagRow = 20
 const axisRow = 24
@@ -194,7 +194,7 @@ export function stripLayout(run: Run, measures: Measures, size: Size): StripLayo
       top: panelTop,
       bottom: panelBottom,
       y,
-      ticks: y.ticks(Math.max(2, Math.floor(height / 26))),
+      ticks: roundTicks(y, row.plot === 'loads' || row.plot === 'course' ? 22 : 15),
     }
   })
   return {
@@ -206,6 +206,21 @@ export function stripLayout(run: Run, measures: Measures, size: Size): StripLayo
     panels,
     narrow,
   }
+}
+
+const roundSteps = [1, 2, 5, 10, 15, 20, 30, 45, 60, 90]
+
+/** Ticks at multiples of the smallest round step that leaves room for its figures. */
+function roundTicks(y: ScaleLinear<number, number>, gapPx: number): number[] {
+  const [from = 0, to = 1] = y.domain()
+  const [low, high] = [Math.min(from, to), Math.max(from, to)]
+  const perUnit = Math.abs(y(1) - y(0))
+  const decade = 10 ** Math.max(0, Math.floor(Math.log10(gapPx / perUnit)) - 1)
+  const fine = roundSteps.map((step) => step * decade)
+  const step = fine.find((candidate) => candidate * perUnit >= gapPx) ?? high - low
+  const ticks: number[] = []
+  for (let tick = Math.ceil(low / step) * step; tick <= high; tick += step) ticks.push(tick)
+  return ticks
 }
 
 /** Moment under a place on the strip, seconds, kept within the run. */

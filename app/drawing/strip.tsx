@@ -103,7 +103,12 @@ const Ground = memo(function Ground({ run, layout, clip }: LayerProps) {
               {panel.figure(tick)}
             </text>
           ))}
-          <text x={left} y={panel.top - 5} className="fill-ink-soft">
+          <text
+            x={left}
+            y={panel.top - 5}
+            className="fill-ink-soft stroke-paper [paint-order:stroke]"
+            strokeWidth={4}
+          >
             {narrow ? panel.shortTitle : panel.title}
           </text>
         </g>
@@ -191,10 +196,10 @@ function Flags({ run, layout }: { run: Run; layout: StripLayout }) {
       // biome-ignore lint/suspicious/noArrayIndexKey: two of a kind may come at one moment
       <g key={index}>
         <path
-          d={`M${at} ${flagRow - 15}V${bottom}`}
+          d={flag.word ? `M${at} ${flagRow - 15}V${bottom}` : `M${at} ${flagRow - 4}v6`}
           className="stroke-ink-soft"
           strokeWidth={0.9}
-          strokeDasharray={flag.word ? '1.5 3' : '1 6'}
+          strokeDasharray={flag.word ? '1.5 3' : undefined}
         />
         {flag.word && (
           <>
@@ -312,7 +317,7 @@ function namesOn(panel: Panel, ghosts: readonly Ghost[], measures: Measures): En
     names.map(({ y }) => y),
     17,
     panel.top + 3,
-    panel.bottom,
+    panel.bottom - 4,
   )
   return names.map((name, index) => ({ ...name, y: heights[index] ?? name.y }))
 }

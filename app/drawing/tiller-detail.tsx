@@ -1,9 +1,10 @@
-import { useId } from 'react'
-import { Balloon } from './balloon'
+import { useId, useMemo } from 'react'
+import { Balloon, balloonRadius } from './balloon'
+import { alongInk, placeBalloons } from './balloon-places'
 import { type DetailFrame, detailFrame } from './detail-frame'
 import { DeckBlock, HitchTurns, LeadSymbol, MadeFast } from './fittings'
 import { direction, onPaper, type Point, polyline, tenth } from './frame'
-import { type RigGeometry, rigGeometry, tillerAngles } from './geometry'
+import { type RigGeometry, rigGeometry, tillerAngles, trimmedAngle } from './geometry'
 import { HullDrawing } from './hull-drawing'
 import { partNumber, partsOf } from './parts'
 import { ControlLine, ElasticCord, Sheet } from './rope'
@@ -87,7 +88,7 @@ export function TillerDetail(props: TillerDetailProps) {
   const { plan, moment, measures, width, height, label, active = null } = props
   const clip = useId()
   const rig = rigGeometry(plan, moment)
-  const view = detailView(plan, props)
+  const view = useMemo(() => detailView(plan, { width, height }), [plan, width, height])
   const { centre, radius, scale, place } = view
   const stock = place({ x: 0, y: 0 })
   return (
@@ -268,31 +269,79 @@ interface NumbersProps {
   active: PartKey | null
 }
 
+/** Circled numbers: they stand still for a setup, only their leader lines follow the parts. */
 function Numbers({ plan, rig, view, active }: NumbersProps) {
   const parts = partsOf(plan)
-  const { place, centre, radius } = view
-  const leeward = -rig.tack
-  const near: [PartKey, Point, number, number][] = [
-    ['sheet', mid(rig.hitch, rig.sheetBoom, 0.35), leeward * 30, -18],
-    ['hitch', rig.hitch, leeward * 8, -30],
-    ['tiller', { x: rig.tillerTip.x * 0.4, y: rig.tillerTip.y * 0.4 }, rig.tack * 34, 10],
-    ['elastic', mid(rig.cordFrom, rig.tillerElastic, 0.4), 0, -32],
-    ['elastic-anchor', rig.elasticAnchor, 0, 28],
-    ['line', mid(rig.line[0] ?? rig.hitch, rig.line[1] ?? rig.tillerLine, 0.5), rig.tack * 10, -30],
-    ...rig.leads.map((lead, index): [PartKey, Point, number, number] => [
-      `lead.${index}`,
-      lead,
-      rig.tack * 28,
-      index ? 16 : -14,
-    ]),
-  ]
-  return near.map(([key, point, dx, dy]) => {
+  const standing = useMemo(() => standingNumbers(plan, view), [plan, view])
+  const now = numberedPoints(rig)
+  return standing.map(({ key, at }) => {
     const number = partNumber(parts, key)
-    if (number === undefined) return null
-    const part = place(point)
-    const at = pulledWithin({ x: part.x + dx, y: part.y + dy }, centre, radius - 16)
-    return <Balloon key={key} part={part} at={at} text={String(number)} strong={active === key} />
+    const point = now.get(key)
+    if (number === undefined || !point) return null
+    return (
+      <Balloon
+        key={key}
+        part={view.place(point)}
+        at={at}
+        text={String(number)}
+        strong={active === key}
+      />
+    )
   })
+}
+
+/** The point of each part that its number points to. */
+function numberedPoints(rig: RigGeometry): Map<PartKey, Point> {
+  const first = rig.line[1] ?? rig.tillerLine
+  const points: [PartKey, Point][] = [
+    ['sheet', mid(rig.hitch, rig.sheetBoom, 0.3)],
+    ['hitch', rig.hitch],
+    ['line', mid(rig.hitch, first, 0.5)],
+    ['tiller', { x: rig.tillerTip.x * 0.42, y: rig.tillerTip.y * 0.42 }],
+    ['elastic', mid(rig.cordFrom, rig.tillerElastic, 0.45)],
+    ['elastic-anchor', rig.elasticAnchor],
+    ...rig.leads.map((lead, index): [PartKey, Point] => [`lead.${index}`, lead]),
+  ]
+  return new Map(points)
+}
+
+function standingNumbers(plan: TillerDetailProps['plan'], view: DetailView) {
+  const rest = {
+    boomDeg: { [plan.setup.source]: trimmedAngle(plan, plan.setup.source) },
+    tillerDeg: 0,
+    hitchOutM: Math.max(0, plan.setup.line.takeUp),
+    elasticStretchM: plan.setup.elastic.stretch,
+  }
+  const rig = rigGeometry(plan, rest)
+  if (!rig) return []
+  const { place, centre, radius } = view
+  const wanted = [...numberedPoints(rig)]
+    .filter(([key]) => key !== 'hitch' || plan.setup.line.pull === 'deflected')
+    .map(([key, point]) => {
+      const part = place(point)
+      const out = key === 'line' || key === 'hitch' || key === 'sheet' ? -1 : 1
+      return { key, part, at: { x: part.x + 26 * Math.sign(point.y || 1), y: part.y + 16 * out } }
+    })
+  const ends = [...rig.line, rig.tillerTip, rig.stock]
+  const ink = [
+    ...ends.flatMap((point, index) => {
+      const before = ends[index - 1]
+      return before ? alongInk(place(before), place(point)) : []
+    }),
+    ...alongInk(place(rig.sheetDeck), place(rig.sheetBoom)),
+    ...[-9, 9].flatMap((offset) =>
+      alongInk(
+        lowered(place(rig.elasticAnchor), offset),
+        lowered(place(rig.tillerElastic), offset),
+      ),
+    ),
+  ]
+  const places = placeBalloons(wanted, ink, centre, radius - balloonRadius - 4)
+  return wanted.map(({ key }, index) => ({ key, at: places[index] ?? centre }))
+}
+
+function lowered(at: Anchor, by: number): Anchor {
+  return { x: at.x, y: at.y + by }
 }
 
 function mid(a: Point, b: Point, part: number): Point {

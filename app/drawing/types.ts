@@ -111,6 +111,15 @@ export interface TillerDetailProps extends Size {
 
 export type PartAnchors = Readonly<Partial<Record<PartKey, Anchor>>>
 
+/** `app/drawing/track-chart.tsx`: `TrackChart`. */
+export interface TrackChartProps extends Size {
+  run: Run
+  moment: Moment
+  measures: Measures
+  ghosts?: readonly Ghost[]
+  label: string
+}
+
 /** `app/drawing/stern-view.tsx`: `SternView`. */
 export interface SternViewProps extends Size {
   plan: Plan

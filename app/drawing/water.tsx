@@ -93,7 +93,9 @@ function startOfWind(run: Run): number {
   return (series.headingDeg[0] ?? 0) + (series.courseToWindDeg[0] ?? 0)
 }
 
-const wakeS = 30
+const trackS = 30
+/** Seconds for which her wave crests are still seen. */
+const crestS = 9
 /** Half the angle of a ship's wave wedge, arcsin(1/3). */
 const wedge = Math.asin(1 / 3)
 
@@ -112,12 +114,14 @@ export function Wake({ run, moment, scale, at, sternPx }: WakeProps) {
   const trail = trailBehind(run, moment, scale, at)
   const seen = trail.filter((point) => Math.hypot(point.x - at.x, point.y - at.y) > sternPx)
   if (seen.length < 2) return null
-  const crests = seen.map((point) => crestPair(point, trail[point.age - 1] ?? point, scale))
+  const crests = seen
+    .filter((point) => point.age <= crestS)
+    .map((point) => crestPair(point, trail[point.age - 1] ?? point, scale))
   return (
     <g className="fill-none" strokeLinecap="round">
       <path d={polyline(seen)} className="stroke-ink-soft" strokeWidth={1} />
-      <path d={crests.slice(0, 6).join('')} className="stroke-ink-soft" strokeWidth={1} />
-      <path d={crests.slice(6).join('')} className="stroke-ink-pale" strokeWidth={0.75} />
+      <path d={crests.slice(0, 4).join('')} className="stroke-ink-soft" strokeWidth={1} />
+      <path d={crests.slice(4).join('')} className="stroke-ink-pale" strokeWidth={0.75} />
     </g>
   )
 }
@@ -148,7 +152,7 @@ function trailBehind(run: Run, moment: Moment, scale: number, at: Anchor): Trail
   const { series } = run.result
   const up = direction(moment.headingDeg + moment.courseToWindDeg)
   const trail: TrailPoint[] = []
-  for (let age = 0; age <= wakeS; age += 1) {
+  for (let age = 0; age <= trackS; age += 1) {
     const timeS = moment.timeS - age
     if (timeS < (series.timeS[0] ?? 0)) break
     const { index, part } = sampleAt(series.timeS, timeS)

@@ -121,7 +121,17 @@ interface CoursePointerProps {
 export function CoursePointer({ ring, courseDeg, text, from }: CoursePointerProps) {
   const { radius } = ring
   const tip = onRing(ring, courseDeg, radius - 1)
-  const label = onRing(ring, courseDeg, radius + 28 + 16 * Math.abs(Math.sin(radians(courseDeg))))
+  const small = radius < 200
+  const sideways = small ? 2 : 16
+  const label = onRing(
+    ring,
+    courseDeg,
+    radius + 28 + sideways * Math.abs(Math.sin(radians(courseDeg))),
+  )
+  // Head to wind it stands beside the wind's arrow.
+  const aside = ring.centre.x - label.x
+  if (Math.abs(courseDeg) < 90 && Math.abs(aside) < 40)
+    label.x = ring.centre.x - (courseDeg < 0 ? -40 : 40)
   return (
     <g>
       <path
@@ -142,7 +152,7 @@ export function CoursePointer({ ring, courseDeg, text, from }: CoursePointerProp
         className="fill-ink stroke-paper [paint-order:stroke]"
         strokeWidth={5}
         strokeLinejoin="round"
-        style={{ fontSize: 22, fontWeight: 600 }}
+        style={{ fontSize: small ? 17.5 : 21.875, fontWeight: 600 }}
       >
         {text}
       </text>
