@@ -55,17 +55,17 @@ const happeningCodes = namesOf<Happening['code']>({
   reef: true,
 })
 
-const metricNames = namesOf<Exclude<keyof Metrics, 'holds' | 'balanceSpeedKn'>>({
-  meanCourseToWindDeg: true,
-  rmsCourseErrorDeg: true,
-  maxCourseErrorDeg: true,
-  withinBandFraction: true,
-  meanSpeedKn: true,
-  maxHeelDeg: true,
-  peakControlLineN: true,
-  peakElasticN: true,
-  peakSheetN: true,
-})
+const metricNames = [
+  'meanCourseToWindDeg',
+  'rmsCourseErrorDeg',
+  'maxCourseErrorDeg',
+  'withinBandFraction',
+  'meanSpeedKn',
+  'maxHeelDeg',
+  'peakControlLineN',
+  'peakElasticN',
+  'peakSheetN',
+] as const satisfies Exclude<keyof Metrics, 'holds'>[]
 
 export const holdRateSchema = z
   .strictObject({
