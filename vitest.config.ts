@@ -13,6 +13,7 @@ export default defineConfig({
         resolve,
         test: {
           name: 'node',
+          sequence: { groupOrder: 0 },
           include: ['tests/{laws,outside,unit}/**/*.test.{ts,tsx}'],
           environment: 'node',
           testTimeout: 60_000,
@@ -23,6 +24,7 @@ export default defineConfig({
         resolve,
         test: {
           name: 'database',
+          sequence: { groupOrder: 1 },
           include: ['tests/database/**/*.test.ts'],
           environment: 'node',
           testTimeout: 60_000,
@@ -34,6 +36,7 @@ export default defineConfig({
         resolve,
         test: {
           name: 'browser',
+          sequence: { groupOrder: 2 },
           include: ['tests/browser/**/*.test.ts'],
           globalSetup: ['tests/browser/server.setup.ts'],
           environment: 'node',

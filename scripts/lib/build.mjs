@@ -65,13 +65,17 @@ export function ensureBuild(kind, say) {
     if (existsSync(folder)) return { folder, fresh: false }
     say('building')
     clearAway()
-    const env = { ...process.env, NODE_ENV: 'production', BUILD_FOLDER: `build/${name}.unfinished` }
+    const env = {
+      ...process.env,
+      NODE_ENV: 'production',
+      BUILD_FOLDER: `build/${name}.unfinished`,
+    }
     try {
       await run(join(root, 'node_modules', '.bin', program), args, { env, log: `build-${kind}` })
     } catch (error) {
       if (!(error instanceof ProgramFailed)) throw error
       throw new Trouble(
-        `The build failed: ${error.reason(/^.*error[: ]+/i)}. All it wrote: ${logPath(`build-${kind}`)}`,
+        `The build failed: ${error.reason(/^\[[A-Z_]+\] |^\w*Error: /)}. All it wrote: ${logPath(`build-${kind}`)}`,
         { cause: error },
       )
     }

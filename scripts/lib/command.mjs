@@ -37,9 +37,17 @@ async function guarded(work) {
     return await work()
   } catch (error) {
     if (error instanceof Stopped) return codeAfter[error.signal] ?? 1
-    process.stderr.write(`${inOneLine(error, root)}\n`)
-    const known = error instanceof Trouble || systemCode(error) !== ''
-    if (!known && error instanceof Error) process.stderr.write(`${error.stack}\n`)
+    tell(error)
     return 1
   }
+}
+
+/**
+ * Says in one line what went wrong; only a fault of the commands themselves shows its stack.
+ * @param {unknown} error
+ */
+export function tell(error) {
+  process.stderr.write(`${inOneLine(error, root)}\n`)
+  const known = error instanceof Trouble || systemCode(error) !== ''
+  if (!known && error instanceof Error) process.stderr.write(`${error.stack}\n`)
 }

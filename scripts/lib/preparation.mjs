@@ -1,6 +1,8 @@
+import { existsSync } from 'node:fs'
 import { join } from 'node:path'
 import { pathToFileURL } from 'node:url'
 import { ensureBuild } from './build.mjs'
+import { installPackage } from './debian.mjs'
 import { ensureDependencies } from './dependencies.mjs'
 import { alone } from './lock.mjs'
 import { joinCluster } from './postgres/cluster.mjs'
@@ -10,6 +12,8 @@ import { step } from './steps.mjs'
 import { systemCode, Trouble } from './trouble.mjs'
 
 /** The steps of the set-up that the commands share. */
+
+const chromiumPath = process.env.CHROMIUM || '/usr/bin/chromium'
 
 export function prepareDependencies() {
   return step(
@@ -45,6 +49,19 @@ export async function prepareServedDatabase(given) {
   return address
 }
 
+/** Makes sure that there is a browser to test with, on a path that CHROMIUM may give. */
+export function prepareBrowser() {
+  return step(
+    'Chromium',
+    async (say) => {
+      if (existsSync(chromiumPath)) return false
+      await installPackage('chromium', 'Chromium', say)
+      return true
+    },
+    (installed) => (installed ? 'installed' : 'there'),
+  )
+}
+
 export function prepareCluster() {
   return step('PostgreSQL', joinCluster, ({ state }) => state)
 }
@@ -60,8 +77,7 @@ export function prepareDatabase(address, { madeFrom } = {}) {
     'Database',
     (say) =>
       alone('tables', async () => {
-        const name = decodeURIComponent(new URL(address).pathname.slice(1))
-        const made = madeFrom !== undefined && (await createIfMissing(madeFrom, name))
+        const made = madeFrom !== undefined && (await createIfMissing(madeFrom, address))
         await connected(address, (client) => client.query('select'))
         const { migrateDatabase, loadDemo } = await loadPrograms(say)
         await attempt('Its tables were not brought up to date', () =>

@@ -1,6 +1,7 @@
 import { spawn } from 'node:child_process'
 import { mkdirSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { stripVTControlCharacters } from 'node:util'
 import { root } from './root.mjs'
 import { stopRequested } from './signals.mjs'
 import { Stopped } from './trouble.mjs'
@@ -51,7 +52,7 @@ export function run(program, args, options = {}) {
     let output = ''
     for (const stream of /** @type {const} */ (['stdout', 'stderr'])) {
       child[stream].setEncoding('utf8').on('data', (text) => {
-        output += text
+        output += stripVTControlCharacters(text)
         if (show) process[stream].write(text)
       })
     }

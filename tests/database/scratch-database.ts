@@ -11,7 +11,7 @@ export interface ScratchDatabase {
 export async function scratchDatabase({ migrated = true } = {}): Promise<ScratchDatabase> {
   const given = process.env.TEST_SERVER_URL ?? process.env.DATABASE_URL
   if (!given) throw new Error('DATABASE_URL names no server to test on; run npm test')
-  const name = `scratch_${randomBytes(6).toString('hex')}`
+  const name = `${new URL(given).pathname.slice(1)}_${randomBytes(6).toString('hex')}`
   await runOn(given, `create database ${name}`)
   const url = new URL(given)
   url.pathname = `/${name}`

@@ -54,17 +54,37 @@ export function siblingAddress(address, database) {
   return url.href
 }
 
+const nameOf = (/** @type {string} */ address) =>
+  decodeURIComponent(new URL(address).pathname.slice(1))
+
 /**
- * @param {string} address of any database on the server
- * @param {string} name
+ * @param {string} server the address of another database there
+ * @param {string} address
  */
-export function createIfMissing(address, name) {
-  return connected(address, async (client) => {
+export function createIfMissing(server, address) {
+  const name = nameOf(address)
+  return connected(server, async (client) => {
     const { rowCount } = await client.query('select from pg_database where datname = $1', [name])
     if (rowCount) return false
     await client.query(`create database ${client.escapeIdentifier(name)}`)
     return true
   })
+}
+
+/**
+ * @param {string} server the address of another database there
+ * @param {string} address
+ */
+export function drop(server, address) {
+  return connected(server, (client) => dropNow(client, nameOf(address)))
+}
+
+/**
+ * @param {import('pg').Client} client
+ * @param {string} name
+ */
+function dropNow(client, name) {
+  return client.query(`drop database if exists ${client.escapeIdentifier(name)} with (force)`)
 }
 
 const testPrefix = 'counterhelm_test_'
@@ -77,28 +97,18 @@ export const testDatabaseName = () =>
   `${testPrefix}${process.pid}_${randomBytes(4).toString('hex')}`
 
 /**
- * @param {string} address of any other database on the server
- * @param {string} name
- */
-export function drop(address, name) {
-  return connected(address, (client) =>
-    client.query(`drop database if exists ${client.escapeIdentifier(name)} with (force)`),
-  )
-}
-
-/**
  * Drops what killed test runs left behind on the clone's own server.
- * @param {string} address of any other database on the server
+ * @param {string} server the address of another database there
  * @param {(pid: number) => boolean} isAlive
  */
-export function dropAbandonedTests(address, isAlive) {
-  return connected(address, async (client) => {
+export function dropAbandonedTests(server, isAlive) {
+  return connected(server, async (client) => {
     const { rows } = await client.query('select datname from pg_database where datname like $1', [
       `${testPrefix}%`,
     ])
     for (const { datname } of rows) {
       if (isAlive(Number.parseInt(datname.slice(testPrefix.length), 10))) continue
-      await client.query(`drop database if exists ${client.escapeIdentifier(datname)} with (force)`)
+      await dropNow(client, datname)
     }
   })
 }

@@ -9,7 +9,7 @@ import {
   renameSync,
   writeFileSync,
 } from 'node:fs'
-import { basename, join } from 'node:path'
+import { basename, dirname, join } from 'node:path'
 import { isRoot } from '../debian.mjs'
 import { ProgramFailed, run } from '../programs.mjs'
 import { root } from '../root.mjs'
@@ -42,7 +42,7 @@ export async function chooseHome() {
   const outside = homeFor(root)
   if (!isRoot || existsSync(join(inClone, markName))) return inClone
   if (existsSync(join(outside, markName))) return outside
-  return (await serverUserReaches(root)) ? inClone : outside
+  return (await serverUserReaches(dirname(inClone))) ? inClone : outside
 }
 
 /**
@@ -81,6 +81,8 @@ export function claimHome(home) {
     throw new Trouble(`${home} holds files that this project did not make. Move them away.`)
   }
   mkdirSync(home, { recursive: true })
+  // Whatever mask this user makes folders with, the server's user must get to his own.
+  if (!home.startsWith(root)) chmodSync(dirname(home), 0o755)
   writeFileSync(`${mark}.part`, JSON.stringify({ clone: root }))
   renameSync(`${mark}.part`, mark)
   chmodSync(home, 0o700)
