@@ -1,4 +1,4 @@
-import type { Plan } from 'sim/plan/types'
+import type { Plan, Sail } from 'sim/plan/types'
 import { WindArrow } from './arrows'
 import { Balloon } from './balloon'
 import { detailFrame } from './detail-frame'
@@ -14,7 +14,7 @@ import { Mast, Pole, Preventer, SailDrawing } from './sail-drawing'
 import { type SailShape, sailShape } from './sail-shape'
 import { ScaleBar } from './scale-bar'
 import { RudderBlade, Tiller } from './tiller-drawing'
-import type { Anchor, Run, SeaTrialSheetProps } from './types'
+import type { Anchor, Moment, Run, SeaTrialSheetProps } from './types'
 import { Wake, Waves, windSwingDeg } from './water'
 import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
 
@@ -42,6 +42,8 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
   const turn = -moment.courseToWindDeg
   const onSheet = (point: Anchor): Anchor => turned(point, turn, centre, midships * scale)
   const gravityAt = onSheet(onPaper({ x: hull.centreOfGravityX, y: 0 }, scale))
+
+  const shapes = sailShapes(plan, moment)
 
   return (
     <svg
@@ -88,10 +90,10 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
         transform={`translate(${centre.x} ${centre.y}) rotate(${tenth(turn)}) translate(0 ${tenth(midships * scale)})`}
       >
         <HullDrawing boat={plan.boat} scale={scale} />
-        <Rigging {...props} scale={scale} />
+        <Rigging {...props} scale={scale} shapes={shapes} />
       </g>
       <DetailRing {...props} scale={scale} onSheet={onSheet} />
-      <SailNumbers {...props} scale={scale} onSheet={onSheet} />
+      <SailNumbers {...props} scale={scale} onSheet={onSheet} shapes={shapes} />
       <ApparentWind {...props} scale={scale} onSheet={onSheet} turn={turn} />
       <TrueWind {...props} centre={centre} radius={radius} />
       <Going {...props} />
@@ -112,20 +114,33 @@ interface PlacedProps extends SeaTrialSheetProps {
   onSheet: (point: Anchor) => Anchor
 }
 
+/** Shapes of the sails that are set, foremost first. */
+type Shapes = readonly { id: string; sail: Sail; shape: SailShape }[]
+
+function sailShapes(plan: Plan, moment: Moment): Shapes {
+  return Object.entries(plan.boat.sails)
+    .sort(([, a], [, b]) => b.luffX - a.luffX)
+    .flatMap(([id, sail]) => {
+      const shape = moment.boomDeg[id] === undefined ? undefined : sailShape(plan, id, moment)
+      return shape ? [{ id, sail, shape }] : []
+    })
+}
+
 /** Everything rigged that moves, from the deck upwards. */
-function Rigging({ run, moment, scale }: SeaTrialSheetProps & { scale: number }) {
+function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) {
+  const { run, moment, scale, shapes } = props
   const { plan } = run.request
   const rig = rigGeometry(plan, moment)
   const paper = (point: { x: number; y: number }) => onPaper(point, scale)
-  const sails = Object.entries(plan.boat.sails).sort(([, a], [, b]) => b.luffX - a.luffX)
+  const masts = Object.values(plan.boat.sails).filter(
+    ({ kind }) => kind === 'main' || kind === 'mizzen',
+  )
   return (
     <>
       {rig && <RudderBlade boat={plan.boat} rig={rig} scale={scale} />}
-      {sails.map(([id, sail]) => {
+      {shapes.map(({ id, sail, shape }) => {
         const deck = sheetLead(plan, id)
-        const shape = sailShape(plan, id, moment)
-        if (!deck || !shape || id === plan.setup.source || moment.boomDeg[id] === undefined)
-          return null
+        if (!deck || id === plan.setup.source) return null
         const boom = shape.boom
           ? alongBoom(shape.boom, sail.sheetReach / sail.footLength)
           : shape.clew
@@ -164,22 +179,15 @@ function Rigging({ run, moment, scale }: SeaTrialSheetProps & { scale: number })
           <ControlLine points={rig.line.map(paper)} tensionN={moment.controlLineN} />
         </>
       )}
-      {sails.map(([id]) => {
-        const shape = moment.boomDeg[id] === undefined ? undefined : sailShape(plan, id, moment)
-        return (
-          shape && (
-            <g key={id}>
-              <SailDrawing shape={shape} scale={scale} />
-              <Held plan={plan} sailId={id} shape={shape} scale={scale} />
-            </g>
-          )
-        )
-      })}
-      {sails
-        .filter(([, sail]) => sail.kind === 'main' || sail.kind === 'mizzen')
-        .map(([id, sail]) => (
-          <Mast key={id} x={sail.luffX} scale={scale} />
-        ))}
+      {shapes.map(({ id, shape }) => (
+        <g key={id}>
+          <SailDrawing shape={shape} scale={scale} />
+          <Held plan={plan} sailId={id} shape={shape} scale={scale} />
+        </g>
+      ))}
+      {masts.map((sail) => (
+        <Mast key={sail.name} x={sail.luffX} scale={scale} />
+      ))}
     </>
   )
 }
@@ -245,23 +253,21 @@ function DetailRing({ run, scale, onSheet }: PlacedProps) {
 }
 
 /** Circled numbers of the sails, to leeward of each. */
-function SailNumbers({ run, moment, scale, onSheet }: PlacedProps) {
-  const { plan } = run.request
-  const parts = partsOf(plan)
-  return parts.map((part) => {
-    if (!part.key.startsWith('sail.')) return null
-    const id = part.key.slice('sail.'.length)
-    const foot = sailShape(plan, id, moment)?.sections[0]
-    const middle = foot?.[7]
-    if (!middle) return null
+function SailNumbers(props: PlacedProps & { shapes: Shapes }) {
+  const { run, moment, scale, onSheet, shapes } = props
+  const parts = partsOf(run.request.plan)
+  return shapes.map(({ id, shape }) => {
+    const middle = shape.sections[0]?.[7]
+    const number = partNumber(parts, `sail.${id}`)
+    if (!middle || number === undefined) return null
     const side = (moment.boomDeg[id] ?? 0) < 0 ? -1 : 1
     const at = { x: middle.x + 0.1, y: middle.y + side * (30 / scale) }
     return (
       <Balloon
-        key={part.key}
+        key={id}
         part={onSheet(onPaper(middle, scale))}
         at={onSheet(onPaper(at, scale))}
-        text={String(partNumber(parts, part.key) ?? '')}
+        text={String(number)}
       />
     )
   })

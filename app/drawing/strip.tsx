@@ -16,13 +16,19 @@ import {
 import { tracePath } from './trace-path'
 import type { Ghost, Measures, Run, StripProps } from './types'
 
+const noGhosts: readonly Ghost[] = []
+
 /** Ten minutes on one time axis; what is past in full ink, what is to come pale. */
 export function Strip(props: StripProps) {
-  const { run, ghosts = [], cursorS, measures, label, width, height, onScrub } = props
+  const { run, ghosts = noGhosts, cursorS, measures, label, width, height, onScrub } = props
   const id = useId()
   const layout = useMemo(
     () => stripLayout(run, measures, { width, height }),
     [run, measures, width, height],
+  )
+  const names = useMemo(
+    () => layout.panels.map((panel) => namesOn(panel, ghosts, measures)),
+    [layout, ghosts, measures],
   )
   const cursor = tenth(layout.x(cursorS))
 
@@ -57,8 +63,8 @@ export function Strip(props: StripProps) {
       <g clipPath={`url(#${id}-past)`}>
         <Traces run={run} layout={layout} clip={`${id}-plot`} past />
       </g>
-      <EndNames run={run} ghosts={ghosts} layout={layout} measures={measures} />
-      <Cursor {...props} layout={layout} />
+      <EndNames layout={layout} names={names} />
+      <Cursor run={run} cursorS={cursorS} width={width} layout={layout} names={names} />
     </svg>
   )
 }
@@ -287,7 +293,6 @@ interface EndName {
   text: string
   y: number
   className: string
-  dash?: string
 }
 
 /** Height of a trace's end on its panel, kept on it. */
@@ -311,7 +316,6 @@ function namesOn(panel: Panel, ghosts: readonly Ghost[], measures: Measures): En
         text: ghost.label,
         y: endOn(panel, tracesOf(ghost.run, measures).course[0]),
         className: 'fill-ink-soft',
-        dash: ghostDash[ghost.helm],
       })
   const heights = spread(
     names.map(({ y }) => y),
@@ -323,16 +327,15 @@ function namesOn(panel: Panel, ghosts: readonly Ghost[], measures: Measures): En
 }
 
 interface EndNamesProps {
-  run: Run
-  ghosts: readonly Ghost[]
   layout: StripLayout
-  measures: Measures
+  /** Per panel, its traces first and in their order. */
+  names: readonly EndName[][]
 }
 
 /** Each line carries its own name at its end. */
-const EndNames = memo(function EndNames({ ghosts, layout, measures }: EndNamesProps) {
-  return layout.panels.map((panel) =>
-    namesOn(panel, ghosts, measures).map((name) => (
+const EndNames = memo(function EndNames({ layout, names }: EndNamesProps) {
+  return layout.panels.map((panel, row) =>
+    names[row]?.map((name) => (
       <text
         key={`${panel.plot} ${name.key}`}
         x={layout.right + 8}
@@ -345,9 +348,14 @@ const EndNames = memo(function EndNames({ ghosts, layout, measures }: EndNamesPr
   )
 })
 
+interface CursorProps extends EndNamesProps {
+  run: Run
+  cursorS: number
+  width: number
+}
+
 /** The moment in hand: a line through all plots, a dot on each trace, its figure beside the name. */
-function Cursor(props: StripProps & { layout: StripLayout }) {
-  const { run, ghosts = [], cursorS, measures, layout, width } = props
+function Cursor({ run, cursorS, width, layout, names }: CursorProps) {
   const at = tenth(layout.x(cursorS))
   const { index, part } = sampleAt(run.result.series.timeS, cursorS)
   const atCursor = (trace: Trace) => {
@@ -362,8 +370,8 @@ function Cursor(props: StripProps & { layout: StripLayout }) {
         strokeWidth={1.25}
       />
       <path d={`M${at} ${layout.bottom}l5 8h-10Z`} className="fill-ink" />
-      {layout.panels.map((panel) => {
-        const placed = namesOn(panel, ghosts, measures)
+      {layout.panels.map((panel, row) => {
+        const placed = names[row]
         return panel.traces.map((trace, order) => {
           const value = atCursor(trace)
           const y = Math.min(panel.bottom, Math.max(panel.top, panel.y(value)))
@@ -383,7 +391,7 @@ function Cursor(props: StripProps & { layout: StripLayout }) {
               />
               <text
                 x={width - 2}
-                y={tenth(placed[order]?.y ?? y) + 5}
+                y={tenth(placed?.[order]?.y ?? y) + 5}
                 textAnchor="end"
                 style={{ fontWeight: 600 }}
               >

@@ -3,8 +3,8 @@ import { line } from 'd3-shape'
 const path = line<[number, number]>().digits(1)
 
 /**
- * A trace as path data. Where several samples share a pixel column only the first, the lowest, the
- * highest and the last are kept: the ink is the same and the path stays short. A jump of more than
+ * A trace as path data. Where several samples share a pixel column only the lowest and the highest
+ * are kept: the ink is the same and the path stays short. A jump of more than
  * `breakAt` pixels lifts the pen (a course that comes round through the stern).
  */
 export function tracePath(
@@ -35,6 +35,9 @@ export function keptSamples(
   x: (timeS: number) => number,
 ): number[] {
   const kept: number[] = []
+  const keep = (index: number) => {
+    if (kept[kept.length - 1] !== index) kept.push(index)
+  }
   let start = 0
   while (start < times.length) {
     const column = Math.floor(x(times[start] ?? 0))
@@ -44,13 +47,11 @@ export function keptSamples(
       if ((values[end] ?? 0) < (values[low] ?? 0)) low = end
       if ((values[end] ?? 0) > (values[high] ?? 0)) high = end
     }
-    let before = -1
-    for (const index of [start, Math.min(low, high), Math.max(low, high), end])
-      if (index > before) {
-        kept.push(index)
-        before = index
-      }
+    if (start === 0) keep(0)
+    keep(Math.min(low, high))
+    keep(Math.max(low, high))
     start = end + 1
   }
+  if (times.length > 0) keep(times.length - 1)
   return kept
 }
