@@ -18,6 +18,11 @@ export function onRing(ring: Ring, courseDeg: number, radius = ring.radius): Anc
   }
 }
 
+/** On a phone: names give way to the boat, and the course is written smaller. */
+function isSmall(ring: Ring): boolean {
+  return ring.radius < 200
+}
+
 function spoke(ring: Ring, courseDeg: number, from: number, to: number): string {
   const inner = onRing(ring, courseDeg, from)
   const outer = onRing(ring, courseDeg, to)
@@ -121,7 +126,7 @@ interface CoursePointerProps {
 export function CoursePointer({ ring, courseDeg, text, from }: CoursePointerProps) {
   const { radius } = ring
   const tip = onRing(ring, courseDeg, radius - 1)
-  const small = radius < 200
+  const small = isSmall(ring)
   const sideways = small ? 2 : 16
   const label = onRing(
     ring,
@@ -183,15 +188,17 @@ export function GhostPointer({ ring, courseDeg, label, dash, place }: GhostPoint
         strokeWidth={1.5}
         strokeDasharray={dash}
       />
-      <text
-        x={at.x}
-        y={at.y + 5}
-        textAnchor="middle"
-        className="fill-ink-soft stroke-paper [paint-order:stroke]"
-        strokeWidth={4}
-      >
-        {label}
-      </text>
+      {!isSmall(ring) && (
+        <text
+          x={at.x}
+          y={at.y + 5}
+          textAnchor="middle"
+          className="fill-ink-soft stroke-paper [paint-order:stroke]"
+          strokeWidth={4}
+        >
+          {label}
+        </text>
+      )}
     </g>
   )
 }
