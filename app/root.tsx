@@ -1,10 +1,18 @@
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
 import { type ReactNode, useState } from 'react'
-import { isRouteErrorResponse, Links, Meta, Outlet, Scripts, ScrollRestoration } from 'react-router'
+import {
+  isRouteErrorResponse,
+  Links,
+  Meta,
+  Outlet,
+  Scripts,
+  ScrollRestoration,
+  type ShouldRevalidateFunctionArgs,
+} from 'react-router'
 import type { Route } from './+types/root'
 import './app.css'
 import { readPreferences } from './features/preferences/cookie.server'
-import { usePreferences } from './features/preferences/use-preferences'
+import { PREFERENCES_PATH, usePreferences } from './features/preferences/use-preferences'
 import { Cautions } from './features/shell/cautions'
 import { Masthead } from './features/shell/masthead'
 
@@ -14,6 +22,11 @@ export const links: Route.LinksFunction = () => [
 
 export async function loader({ request }: Route.LoaderArgs) {
   return { preferences: await readPreferences(request) }
+}
+
+/** Preferences change by their own form and by nothing else. */
+export function shouldRevalidate({ formAction }: ShouldRevalidateFunctionArgs) {
+  return formAction === PREFERENCES_PATH
 }
 
 export function Layout({ children }: { children: ReactNode }) {

@@ -3,13 +3,8 @@ import { openTrial } from '~/features/sea-trial/queries.server'
 import { SeaTrial } from '~/features/sea-trial/sea-trial'
 import type { Route } from './+types/sea-trial'
 
-export function meta({ loaderData }: Route.MetaArgs) {
-  const plan = loaderData?.plan
-  const title = plan
-    ? `${plan.setup.name}, ${plan.boat.name} · Sea trial · Counterhelm`
-    : 'Sea trial · Counterhelm'
+export function meta() {
   return [
-    { title },
     {
       name: 'description',
       content:

@@ -22,14 +22,14 @@ interface Props {
 
 /** The boat from above, from astern, and her steering gear with a note on each part. */
 export function Drawings(props: Props) {
-  const sheet = useSize<HTMLDivElement>({ width: 640, height: 520 })
+  const { ref, size } = useSize<HTMLDivElement>({ width: 640, height: 520 })
   return (
     <>
-      <div ref={sheet.ref} className="sheet relative min-w-0">
-        <FromAbove {...props} size={sheet.size} />
-        <div className="absolute right-0 bottom-0 h-28 w-36 md:h-36 md:w-44">
-          <FromAstern {...props} />
+      <div className="sheet relative min-w-0">
+        <div ref={ref} className="h-full">
+          <FromAbove {...props} size={size} />
         </div>
+        <FromAstern {...props} />
       </div>
       <SteeringGear {...props} />
     </>
@@ -53,20 +53,28 @@ function FromAbove({ run, ghosts, playback, measures, size }: Props & { size: Si
   )
 }
 
-const sternSize: Size = { width: 176, height: 144 }
-
+/** In the corner she points away from. */
 function FromAstern({ run, playback, measures }: Props) {
   const { moment } = useMoment(run, playback)
+  const { ref, size } = useSize<HTMLDivElement>({ width: 176, height: 144 })
+  const corner = run.request.conditions.trueWindAngleDeg < 0 ? 'left-0' : 'right-0'
   return (
-    <SternView
-      {...sternSize}
-      plan={run.request.plan}
-      moment={moment}
-      measures={measures}
-      label="Heel, seen from astern"
-    />
+    <div
+      ref={ref}
+      className={`absolute top-9 h-22 w-24 md:h-28 md:w-32 xl:top-0 xl:h-36 xl:w-44 ${corner}`}
+    >
+      <SternView
+        {...size}
+        plan={run.request.plan}
+        moment={moment}
+        measures={measures}
+        label="Heel, seen from astern"
+      />
+    </div>
   )
 }
+
+const openedNote = 'z-20 max-h-[70dvh] w-80 overflow-y-auto bg-cloth px-3 outline outline-ink'
 
 function SteeringGear({ run, playback, measures }: Props) {
   const { plan } = useAdjusting()
@@ -80,10 +88,11 @@ function SteeringGear({ run, playback, measures }: Props) {
     anchors,
     size,
   )
+  const toggle = (key: PartKey) => setOpen(open === key ? null : key)
   const sails = parts.filter(({ key }) => key.startsWith('sail.'))
   return (
     <section aria-label="Steering gear" className="gear flex min-w-0 flex-col">
-      <div className="relative grid min-h-0 flex-1 grid-cols-1 xl:grid-cols-[11.5rem_1fr_11.5rem]">
+      <div className="relative grid min-h-0 flex-1 grid-cols-1 gap-x-3 xl:grid-cols-[11.5rem_1fr_11.5rem]">
         <div ref={ref} className="min-h-0 min-w-0 xl:col-start-2">
           <Detail
             run={run}
@@ -101,18 +110,27 @@ function SteeringGear({ run, playback, measures }: Props) {
             return (
               <div
                 key={key}
-                className={`absolute ${side === 'left' ? 'right-[calc(100%-11.5rem)]' : 'left-[calc(100%-11.5rem)]'} ${open === key ? 'z-20 w-80 bg-cloth px-3 outline outline-ink' : ''}`}
+                className={`absolute ${side === 'left' ? 'right-[calc(100%-11.5rem)]' : 'left-[calc(100%-11.5rem)]'} ${open === key ? openedNote : ''}`}
                 style={{ top, width: open === key ? undefined : NOTE.width }}
               >
-                <PartNote part={part} open={open === key} onToggle={setOpen} />
+                <PartNote part={part} open={open === key} onToggle={() => toggle(key)} leadsIn />
               </div>
             )
           })}
         </div>
       </div>
-      <div className="max-xl:hidden grid grid-cols-3 gap-4">
+      <div className="grid grid-cols-3 gap-4 max-xl:hidden">
         {sails.map((part) => (
-          <PartNote key={part.key} part={part} open={open === part.key} onToggle={setOpen} />
+          <div key={part.key} className="relative h-touch">
+            <div className={open === part.key ? `absolute bottom-0 left-0 ${openedNote}` : ''}>
+              <PartNote
+                part={part}
+                open={open === part.key}
+                onToggle={() => toggle(part.key)}
+                leadsIn
+              />
+            </div>
+          </div>
         ))}
       </div>
     </section>
@@ -146,7 +164,7 @@ function Detail({ run, playback, measures, size, places, active }: DetailProps) 
         {places.map(({ part, side, top }) => {
           const at = anchors[part]
           if (!at) return null
-          const x = side === 'left' ? -4 : size.width + 4
+          const x = side === 'left' ? -10 : size.width + 10
           return (
             <path
               key={part}

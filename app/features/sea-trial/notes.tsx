@@ -10,18 +10,20 @@ import { ParameterField } from './parameter-field'
 interface Props {
   part: Part
   open: boolean
-  onToggle: (part: PartKey | null) => void
+  onToggle: () => void
+  /** Whether opening it leads the keyboard into it, as it must where it opens over the drawing. */
+  leadsIn?: boolean
 }
 
 /** A note on a part: what it is set to, and its controls when opened. */
-export function PartNote({ part, open, onToggle }: Props) {
+export function PartNote({ part, open, onToggle, leadsIn = false }: Props) {
   const adjusting = useAdjusting()
   const { figure, unit } = mainReading(part.key, adjusting)
   const whole = useRef<HTMLDivElement>(null)
 
   useEffect(() => {
-    if (open) whole.current?.querySelector<HTMLElement>('input, select')?.focus()
-  }, [open])
+    if (open && leadsIn) whole.current?.querySelector<HTMLElement>('input, select')?.focus()
+  }, [open, leadsIn])
 
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: Escape in any control within closes it
@@ -29,7 +31,7 @@ export function PartNote({ part, open, onToggle }: Props) {
       ref={whole}
       onKeyDown={(event) => {
         if (event.key !== 'Escape' || event.defaultPrevented || !open) return
-        onToggle(null)
+        onToggle()
         whole.current?.querySelector('button')?.focus()
       }}
     >
@@ -39,7 +41,7 @@ export function PartNote({ part, open, onToggle }: Props) {
         figure={figure}
         unit={unit}
         open={open}
-        onToggle={() => onToggle(open ? null : part.key)}
+        onToggle={onToggle}
       >
         <div className="grid gap-3">
           {keysOfPart(part.key).map((key) => (
@@ -54,9 +56,6 @@ export function PartNote({ part, open, onToggle }: Props) {
 function mainReading(part: PartKey, { plan, units }: Adjusting): Reading {
   const key = mainKeyOf(part)
   const parameter = key === undefined ? undefined : parameterAt(plan, key)
-  if (key === undefined || !parameter) return { figure: '', unit: '' }
-  const value = readValue(plan, key)
-  return parameter.type === 'choice'
-    ? { figure: parameter.options[value] ?? String(value), unit: '' }
-    : reading(parameter.unit, Number(value), units, parameter.step)
+  if (key === undefined || parameter?.type !== 'quantity') return { figure: '', unit: '' }
+  return reading(parameter.unit, Number(readValue(plan, key)), units, parameter.step)
 }

@@ -15,7 +15,7 @@ export function PlayBar({ playback, verdict }: Props) {
   return (
     <section
       aria-label="Playing the run"
-      className="sticky bottom-0 z-10 flex flex-wrap items-center gap-x-4 border-t border-ink bg-paper px-4 text-note md:px-margin"
+      className="sticky bottom-0 z-10 grid grid-cols-[auto_auto_1fr] items-center gap-x-4 border-t border-ink bg-paper px-4 text-note md:grid-cols-[auto_auto_auto_1fr] md:px-margin lg:grid-cols-[auto_auto_auto_1fr_minmax(0,auto)]"
     >
       <Button
         weight="strong"
@@ -24,7 +24,7 @@ export function PlayBar({ playback, verdict }: Props) {
       >
         {playing ? 'Pause' : 'Play'}
       </Button>
-      <div className="flex">
+      <div className="flex max-md:hidden">
         <Button weight="word" aria-label="One second back" onClick={() => playback.step(-STEP_S)}>
           −1 s
         </Button>
@@ -33,9 +33,9 @@ export function PlayBar({ playback, verdict }: Props) {
         </Button>
       </div>
       <label className="flex items-center gap-2 text-ink-soft">
-        Speed
+        <span className="max-md:sr-only">Speed</span>
         <select
-          className="h-touch border-0 bg-paper px-1 text-ink"
+          className="min-h-touch bg-paper px-1 text-ink"
           value={speed}
           onChange={(event) => playback.setSpeed(Number(event.target.value) as Speed)}
         >
@@ -46,25 +46,26 @@ export function PlayBar({ playback, verdict }: Props) {
           ))}
         </select>
       </label>
-      <label className="flex min-w-40 flex-1 items-center gap-3">
-        <span className="w-24 text-right">
-          {clock(timeS)} <span className="text-ink-soft">of {clock(endS)}</span>
+      <div className="flex min-w-0 items-center gap-3">
+        <span className="shrink-0 text-right md:w-24">
+          {clock(timeS)} <span className="text-ink-soft max-md:sr-only">of {clock(endS)}</span>
         </span>
-        <input
-          type="range"
-          aria-label="Moment of the run"
-          aria-valuetext={`${clock(timeS)} of ${clock(endS)}`}
-          className="h-touch flex-1"
-          min={0}
-          max={endS}
-          step={1}
-          value={Math.round(timeS)}
-          onChange={(event) => playback.scrub(Number(event.target.value))}
-        />
-      </label>
+        <div className="rule min-w-0 flex-1">
+          <div className="rule-scale" />
+          <input
+            type="range"
+            aria-label="Moment of the run"
+            aria-valuetext={`${clock(timeS)} of ${clock(endS)}`}
+            min={0}
+            max={endS}
+            step={STEP_S}
+            value={Math.round(timeS)}
+            onChange={(event) => playback.scrub(Number(event.target.value))}
+          />
+        </div>
+      </div>
       <p
-        aria-hidden={verdict === null}
-        className={`basis-full truncate pb-1 font-strong lg:max-w-[40%] lg:basis-auto lg:pb-0 ${verdict === null ? 'invisible' : ''}`}
+        className={`col-span-full truncate pb-1 font-strong lg:col-span-1 lg:max-w-md lg:pb-0 ${verdict === null ? 'hidden' : ''}`}
       >
         {verdict}
       </p>

@@ -13,12 +13,12 @@ interface Props {
   dispatch: Dispatch<Action>
 }
 
-/** Taking back, comparing and handing on. */
-export function RunTools({ history, run, dispatch }: Props) {
+/** Taking back what was set. */
+export function StepTools({ history, dispatch }: Omit<Props, 'run'>) {
   const { present, past, future } = history
   const untouched = Object.keys(present.changes).length === 0 && present.events.length === 0
   return (
-    <section aria-label="The run" className="flex flex-wrap items-center gap-x-6 text-note">
+    <div className="steps flex flex-wrap items-end gap-x-4 md:justify-end">
       <Button weight="word" disabled={past.length === 0} onClick={() => dispatch({ type: 'undo' })}>
         Undo
       </Button>
@@ -34,8 +34,17 @@ export function RunTools({ history, run, dispatch }: Props) {
         disabled={untouched}
         onClick={() => dispatch({ type: 'take-all-back' })}
       >
-        Back to the setup as kept
+        Undo all
       </Button>
+    </div>
+  )
+}
+
+/** Who steers, how long, what sails beside her, and handing the run on. */
+export function RunTools({ history, run, dispatch }: Props) {
+  const { present } = history
+  return (
+    <div className="flex flex-wrap items-center gap-x-6 text-note">
       <label className="flex items-center gap-2 text-ink-soft">
         Helm
         <select
@@ -72,7 +81,7 @@ export function RunTools({ history, run, dispatch }: Props) {
           <label key={ghost} className="flex h-touch items-center gap-2">
             <input
               type="checkbox"
-              className="size-5"
+              className="size-5 appearance-none border border-ink checked:border-6"
               checked={present.ghosts.includes(ghost)}
               onChange={() => dispatch({ type: 'run', ghosts: toggled(present.ghosts, ghost) })}
             />
@@ -81,7 +90,7 @@ export function RunTools({ history, run, dispatch }: Props) {
         ))}
       </fieldset>
       <HandOn history={history} run={run} />
-    </section>
+    </div>
   )
 }
 

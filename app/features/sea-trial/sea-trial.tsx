@@ -14,7 +14,7 @@ import { measuresIn } from './measures'
 import { PlayBar } from './play-bar'
 import { Readings } from './readings'
 import { refusalsOf, requestOf } from './request'
-import { RunTools } from './run-tools'
+import { RunTools, StepTools } from './run-tools'
 import { SetupPicker } from './setup-picker'
 import { resultOf, type Sketch } from './sketch'
 import type { TrialState } from './state'
@@ -73,6 +73,7 @@ export function SeaTrial(opening: Props) {
 
   return (
     <AdjustingProvider value={adjusting}>
+      <title>{`${plan.setup.name}, ${plan.boat.name} · Sea trial · Counterhelm`}</title>
       <Masthead
         inHand={{
           boat: plan.boat.name,
@@ -90,34 +91,41 @@ export function SeaTrial(opening: Props) {
             ))}
           </ul>
         )}
+        <noscript>
+          <p className="border-b border-ink px-4 py-2 text-note md:px-margin">
+            Without JavaScript this page shows the setup, her course at the start and the verdict of
+            a run computed by the server. Playing and adjusting need JavaScript.
+          </p>
+        </noscript>
         <div className="trial-sheet px-4 pt-3 md:px-margin">
-          <div className="[grid-area:picker]">
-            <SetupPicker
-              entries={entries}
-              setupId={state.setupId}
-              units={units}
-              onChoose={(setupId) => dispatch({ type: 'choose-setup', setupId })}
-            />
-          </div>
+          <SetupPicker
+            entries={entries}
+            setupId={state.setupId}
+            units={units}
+            onChoose={(setupId) => dispatch({ type: 'choose-setup', setupId })}
+          />
+          <StepTools history={history} dispatch={dispatch} />
           <Weather />
           <Drawings run={run} ghosts={ghosts} playback={playback} measures={measures} />
           <div ref={titleRef} className="verdict">
             <Verdict run={run} refusals={refusals} fault={fault} />
           </div>
-          <TimeStrip
-            run={run}
-            ghosts={ghosts}
-            plan={plan}
-            eventCount={state.events.length}
-            playback={playback}
-            measures={measures}
-            dispatch={dispatch}
-          />
+          <div className="strip flex min-w-0 flex-col">
+            <TimeStrip
+              run={run}
+              ghosts={ghosts}
+              plan={plan}
+              eventCount={state.events.length}
+              playback={playback}
+              measures={measures}
+              dispatch={dispatch}
+            />
+            <RunTools history={history} run={run} dispatch={dispatch} />
+          </div>
           <div className="title">
             <TitleBlock run={run} units={units} date={date} />
           </div>
         </div>
-        <RunTools history={history} run={run} dispatch={dispatch} />
         <AdjustmentList />
         <EventList events={state.events} durationS={state.durationS} />
         <Readings run={run} playback={playback} measures={measures} />

@@ -31,14 +31,19 @@ export function SetupPicker({ entries, setupId, units, onChoose }: Props) {
   }
 
   return (
-    <form method="get" action="/" className="min-w-0">
-      <label className="grid gap-1 text-note text-ink-soft">
-        Boat and setup
+    <form
+      method="get"
+      action="/"
+      className="picker grid min-w-0 gap-x-6 xl:grid-cols-[minmax(24rem,34rem)_1fr]"
+    >
+      <div className="text-note">
+        <label htmlFor="setup">Boat and setup</label>
         <select
+          id="setup"
           name="setup"
           value={setupId}
           onChange={(event) => void choose(event.target.value)}
-          className="h-touch w-full border border-ink-pale bg-cloth px-2 text-body text-ink"
+          className="h-touch w-full border-b border-ink bg-transparent pl-1 text-body font-strong text-ink [&>optgroup]:bg-paper"
         >
           {grouped(entries).map(({ boat, setups }) => (
             <optgroup key={boat.id} label={`${boat.name}, ${boat.type}`}>
@@ -51,18 +56,18 @@ export function SetupPicker({ entries, setupId, units, onChoose }: Props) {
             </optgroup>
           ))}
         </select>
-      </label>
-      <noscript>
-        <button type="submit" className="mt-2 h-touch border border-ink px-4">
-          Take this setup
-        </button>
-      </noscript>
-      <p className="mt-1 max-w-measure text-note text-ink-soft">{chosen?.summary}</p>
-      {chosen?.flaw && (
-        <p className="mt-1 max-w-measure border-l-2 border-ink pl-3 text-note">
-          Wrong on purpose: {chosen.flaw.text}
-        </p>
-      )}
+        <noscript>
+          <button type="submit" className="mt-2 min-h-touch border border-ink px-4">
+            Take this setup
+          </button>
+        </noscript>
+      </div>
+      <div className="max-w-measure text-note max-xl:mt-1 xl:self-end">
+        <p className="text-ink-soft max-md:line-clamp-2">{chosen?.summary}</p>
+        {chosen?.flaw && (
+          <p className="border-l-2 border-ink pl-3">Wrong on purpose: {chosen.flaw.text}</p>
+        )}
+      </div>
       <p role="alert" className="text-note">
         {fault}
       </p>

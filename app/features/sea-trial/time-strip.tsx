@@ -36,7 +36,7 @@ export function TimeStrip({ run, ghosts, plan, eventCount, playback, measures, d
   }
 
   return (
-    <section aria-label="The run over time" className="strip flex min-w-0 flex-col">
+    <section aria-label="The run over time" className="flex min-h-0 flex-1 flex-col">
       <div className="flex flex-wrap items-center gap-x-4 text-note">
         <span className="text-ink-soft">Drop in</span>
         {kinds.map((kind) => (
@@ -62,7 +62,7 @@ export function TimeStrip({ run, ghosts, plan, eventCount, playback, measures, d
           {full && `No more than ${MOST_EVENTS} events; remove one first.`}
         </span>
       </div>
-      <div ref={ref} className="h-72 min-w-0 lg:h-80">
+      <div ref={ref} className="h-80 min-w-0 xl:h-auto xl:min-h-80 xl:flex-1">
         <Strip
           {...size}
           run={run}

@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
+import { startTransition, useEffect, useMemo, useState, useSyncExternalStore } from 'react'
 import { momentAt } from '~/drawing/moment'
 import type { Moment, Run } from '~/drawing/types'
 import { createPlayback, type Playback, type Playhead, type Speed } from './playback'
@@ -17,8 +17,22 @@ export function usePlayback(endS: number): Playback {
   return playback
 }
 
+/**
+ * Where the cursor is. Frames of a playing run give way to everything else: as urgent updates,
+ * one after another, they would keep a navigation from ever being shown.
+ */
 export function usePlayhead(playback: Playback): Playhead {
-  return useSyncExternalStore(playback.subscribe, playback.head, playback.head)
+  const [head, setHead] = useState(playback.head)
+  useEffect(() => {
+    function follow() {
+      const next = playback.head()
+      if (next.playing) startTransition(() => setHead(next))
+      else setHead(next)
+    }
+    follow()
+    return playback.subscribe(follow)
+  }, [playback])
+  return head
 }
 
 /** The run at the cursor, and whether the water may move. */

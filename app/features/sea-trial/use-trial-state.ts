@@ -1,6 +1,6 @@
 import { useQueryClient } from '@tanstack/react-query'
 import { useEffect, useReducer, useRef } from 'react'
-import { useLocation, useNavigate } from 'react-router'
+import { useLocation, useNavigate, useNavigationType } from 'react-router'
 import type { Plan } from 'sim/plan/types'
 import { decode, queryOf } from './address'
 import { opened, reduce, startOf, type TrialState } from './state'
@@ -8,6 +8,9 @@ import { planQuery, usePlan } from './use-plan'
 
 /** A dragged slider writes the address once it rests; browsers refuse to write it at every step. */
 const ADDRESS_RESTS_MS = 300
+
+/** Marks an address that this page wrote itself, so that it is not opened as if come by. */
+const WRITTEN = 'written by the sea trial'
 
 interface First {
   plan: Plan
@@ -28,31 +31,34 @@ export function useTrialState(first: First, onRemarks: (remarks: string[]) => vo
   const state = arrived ? present : startOf(kept.setup.id)
 
   const location = useLocation()
+  const navigationType = useNavigationType()
   const navigate = useNavigate()
   const queries = useQueryClient()
-  /** The address as last read or written, and the state it stands for. */
-  const written = useRef({ query: location.search, state: first.state })
+  /** The state that the address stands for. */
+  const written = useRef(first.state)
+  const read = useRef(location.key)
 
   useEffect(() => {
-    if (present === written.current.state) return
+    if (present === written.current) return
     const timer = setTimeout(() => {
-      const replace = present.setupId === written.current.state.setupId
-      written.current = { query: queryOf(present), state: present }
-      navigate({ search: written.current.query }, { replace, preventScrollReset: true })
+      const replace = present.setupId === written.current.setupId
+      written.current = present
+      navigate({ search: queryOf(present) }, { replace, preventScrollReset: true, state: WRITTEN })
     }, ADDRESS_RESTS_MS)
     return () => clearTimeout(timer)
   }, [present, navigate])
 
   useEffect(() => {
-    if (location.search === written.current.query) return
-    written.current = { ...written.current, query: location.search }
+    if (location.key === read.current) return
+    read.current = location.key
+    if (navigationType !== 'POP' && location.state === WRITTEN) return
     const query = new URLSearchParams(location.search)
     const setupId = query.get('setup') ?? first.setupId
     queries
       .ensureQueryData(planQuery(setupId))
       .then((plan) => {
         const { state: asked, remarks } = decode(query.get('trial'), plan)
-        written.current = { query: location.search, state: asked }
+        written.current = asked
         dispatch({ type: 'open', state: asked })
         onRemarks(remarks)
       })
@@ -61,7 +67,7 @@ export function useTrialState(first: First, onRemarks: (remarks: string[]) => vo
           `The setup “${setupId.slice(0, 64)}” could not be fetched; the one in hand stays. ${failure instanceof Error ? failure.message : ''}`,
         ])
       })
-  }, [location.search, first.setupId, queries, onRemarks])
+  }, [location, navigationType, first.setupId, queries, onRemarks])
 
   return { history, state, kept, arrived, error, dispatch }
 }

@@ -2,7 +2,7 @@ import { useEffect, useRef, useState } from 'react'
 import type { TrialRequest, TrialResult } from 'sim/trial/types'
 import type { Ghost as DrawnGhost, Run } from '~/drawing/types'
 import { newestOnly } from '~/workers/newest-only'
-import { startTrialThread } from '~/workers/trials'
+import { startTrialThread, type TrialThread } from '~/workers/trials'
 import type { Ghost } from './state'
 
 export const ghostLabels: Record<Ghost, string> = { lashed: 'tiller lashed', free: 'tiller free' }
@@ -20,8 +20,8 @@ export interface Trial {
 type Ask = (request: TrialRequest) => Promise<TrialResult | null>
 
 /**
- * Computes a run in a thread of its own whenever what is asked changes, the ghosts after it. A
- * request of null leaves the last run as it is.
+ * Computes a run in a thread of the browser whenever what is asked changes, the ghosts after it.
+ * A request of null leaves the last run as it is.
  */
 export function useTrial(
   request: TrialRequest | null,
@@ -29,6 +29,8 @@ export function useTrial(
   first: Run,
 ): Trial {
   const ask = useRef<Ask | null>(null)
+  // In a second thread, so that the next movement of a slider does not wait for them.
+  const askBeside = useRef<Ask | null>(null)
   const [shown, setShown] = useState<{ run: Run; ghosts: readonly DrawnGhost[] }>({
     run: first,
     ghosts: [],
@@ -37,11 +39,16 @@ export function useTrial(
   const [fault, setFault] = useState<string | null>(null)
 
   useEffect(() => {
-    const thread = startTrialThread()
-    ask.current = newestOnly((job: TrialRequest) => thread.call((trials) => trials.run(job)))
+    const [own, others] = [startTrialThread(), startTrialThread()]
+    const asked = (thread: TrialThread): Ask =>
+      newestOnly((job) => thread.call((trials) => trials.run(job)))
+    ask.current = asked(own)
+    askBeside.current = asked(others)
     return () => {
       ask.current = null
-      thread.end()
+      askBeside.current = null
+      own.end()
+      others.end()
     }
   }, [])
 
@@ -60,7 +67,7 @@ export function useTrial(
       setFault(null)
       for (const helm of ghosts) {
         const beside = { ...asked, helm }
-        const ghostResult = current ? await ask.current?.(beside) : null
+        const ghostResult = current ? await askBeside.current?.(beside) : null
         if (!ghostResult || !current) return
         const ghost = {
           helm,

@@ -1,4 +1,5 @@
 import { useState } from 'react'
+import { Button } from '~/ui/button'
 import { useAdjusting } from './adjusting'
 import { furtherWeatherKeys, weatherKeys } from './adjustments'
 import { ParameterField } from './parameter-field'
@@ -8,8 +9,9 @@ import { weatherInWords } from './wording'
 export function Weather() {
   const { plan, units } = useAdjusting()
   const [unfolded, setUnfolded] = useState(false)
+  const [further, setFurther] = useState(false)
   return (
-    <section aria-label="Weather" className="[grid-area:weather]">
+    <section aria-label="Weather" className="weather">
       <button
         type="button"
         aria-expanded={unfolded}
@@ -27,22 +29,21 @@ export function Weather() {
       </button>
       <div
         id="weather"
-        className={`grid gap-x-6 gap-y-1 md:grid-cols-3 xl:grid-cols-5 ${unfolded ? '' : 'max-md:hidden'}`}
+        className={`grid items-end gap-x-6 gap-y-1 md:grid-cols-3 xl:grid-cols-[repeat(5,minmax(0,1fr))_5rem] ${unfolded ? '' : 'max-md:hidden'}`}
       >
         {weatherKeys.map((key) => (
           <ParameterField key={key} name={key} brief />
         ))}
+        <Button
+          weight="word"
+          className="justify-self-start text-left"
+          aria-expanded={further}
+          onClick={() => setFurther(!further)}
+        >
+          {further ? 'Less of it' : 'Sea angle, seed'}
+        </Button>
+        {further && furtherWeatherKeys.map((key) => <ParameterField key={key} name={key} brief />)}
       </div>
-      <details className={unfolded ? '' : 'max-md:hidden'}>
-        <summary className="flex min-h-touch w-fit cursor-pointer list-none items-center text-note underline underline-offset-4 [&::-webkit-details-marker]:hidden">
-          Sea off the wind, and seed
-        </summary>
-        <div className="grid gap-x-6 gap-y-1 md:grid-cols-3 xl:grid-cols-5">
-          {furtherWeatherKeys.map((key) => (
-            <ParameterField key={key} name={key} brief />
-          ))}
-        </div>
-      </details>
     </section>
   )
 }

@@ -1,16 +1,16 @@
 import type { Conditions, Plan, TrialEvent } from 'sim/plan/types'
 import { inWords, rounded, type Units } from '~/features/units/units'
 
-/** "12 kn at 60° to starboard". */
+/** "12 kn, 60° starboard tack". */
 export function weatherInWords(conditions: Conditions, units: Units): string {
   const wind = inWords(rounded('kn', conditions.trueWindSpeedKn, units, 1))
   return `${wind}, ${courseInWords(conditions.trueWindAngleDeg)}`
 }
 
-/** A course to the wind with the side the wind comes over. */
+/** A course to the wind, with the side the wind comes over. */
 export function courseInWords(angleDeg: number): string {
   const side = angleDeg < 0 ? 'port' : 'starboard'
-  return `${Math.round(Math.abs(angleDeg))}° to the wind, ${side} tack`
+  return `${Math.round(Math.abs(angleDeg))}° ${side} tack`
 }
 
 /** "2:05". */
