@@ -14,13 +14,13 @@ import { Mast, Pole, Preventer, SailDrawing } from './sail-drawing'
 import { type SailShape, sailShape } from './sail-shape'
 import { ScaleBar } from './scale-bar'
 import { RudderBlade, Tiller } from './tiller-drawing'
-import type { Anchor, Moment, Run, SeaTrialSheetProps } from './types'
+import type { Anchor, Moment, Run, SeaTrialSheetProps, Size } from './types'
 import { Wake, Waves, windSwingDeg } from './water'
 import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
 
 /** Room over the ring for the true wind. */
-function topRoom(width: number): number {
-  return width < 600 ? 66 : 88
+function topRoom({ width, height }: Size): number {
+  return width < 600 || height < 560 ? 66 : 88
 }
 
 /** Pixels of arrow per knot, the same for true and apparent wind. */
@@ -33,11 +33,11 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
   const { run, moment, measures, ghosts = [], label, water = 'running', width, height } = props
   const { plan } = run.request
   const { hull } = plan.boat
-  const top = topRoom(width)
+  const top = topRoom({ width, height })
   const radius = Math.round(Math.min(width / 2 - (width < 600 ? 58 : 76), (height - top - 40) / 2))
   const centre = { x: Math.round(width / 2), y: top + radius }
   const ring = { centre, radius }
-  const scale = (1.3 * radius) / hull.lengthOverall
+  const scale = (1.42 * radius) / hull.lengthOverall
   const midships = hull.bowX - hull.lengthOverall / 2
   const turn = -moment.courseToWindDeg
   const onSheet = (point: Anchor): Anchor => turned(point, turn, centre, midships * scale)
@@ -78,6 +78,7 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
           label={ghost.label}
           dash={ghostDash[ghost.helm]}
           place={place}
+          besideDeg={moment.courseToWindDeg}
         />
       ))}
       <CoursePointer
@@ -305,8 +306,8 @@ interface TrueWindProps extends SeaTrialSheetProps {
 }
 
 /** At the top of the ring; it leans as the wind of the moment swings about the mean. */
-function TrueWind({ run, moment, measures, centre, radius, width }: TrueWindProps) {
-  const length = clamp(moment.windSpeedKn * arrowScale(run), 16, topRoom(width) - 20)
+function TrueWind({ run, moment, measures, centre, radius, width, height }: TrueWindProps) {
+  const length = clamp(moment.windSpeedKn * arrowScale(run), 16, topRoom({ width, height }) - 20)
   return (
     <g>
       <WindArrow

@@ -18,9 +18,9 @@ export function onRing(ring: Ring, courseDeg: number, radius = ring.radius): Anc
   }
 }
 
-/** On a phone: names give way to the boat, and the course is written smaller. */
+/** On a phone: the course is written smaller. */
 function isSmall(ring: Ring): boolean {
-  return ring.radius < 200
+  return ring.radius < 160
 }
 
 function spoke(ring: Ring, courseDeg: number, from: number, to: number): string {
@@ -172,10 +172,14 @@ interface GhostPointerProps {
   dash: string
   /** 0 for the outer place of the name, 1 for the next within. */
   place: number
+  /** Her own course: a name close to it would lie on her bow and says nothing. */
+  besideDeg: number
 }
 
 /** Another helm on the same seed: a dash within the ring, with its name. */
-export function GhostPointer({ ring, courseDeg, label, dash, place }: GhostPointerProps) {
+export function GhostPointer(props: GhostPointerProps) {
+  const { ring, courseDeg, label, dash, place, besideDeg } = props
+  const clear = Math.abs(wrapDegrees(courseDeg - besideDeg)) > 25
   // Names are broader than high: they need more room side by side than above each other.
   const sideways = Math.abs(Math.sin(radians(courseDeg)))
   const from = ring.radius - 30 - (24 + 26 * sideways) * place
@@ -188,7 +192,7 @@ export function GhostPointer({ ring, courseDeg, label, dash, place }: GhostPoint
         strokeWidth={1.5}
         strokeDasharray={dash}
       />
-      {!isSmall(ring) && (
+      {clear && (
         <text
           x={at.x}
           y={at.y + 5}
