@@ -48,21 +48,38 @@ export interface Flag {
 /** Average advance of 14 px type, enough to tell whether two words meet. */
 const letterPx = 7.4
 
+/** What was dropped in is named first, then what ended the run's claim to hold, then the rest. */
+const rank: Record<Happening['code'], number> = {
+  gust: 0,
+  'wind-shift': 0,
+  'wave-set': 0,
+  reef: 0,
+  tacked: 1,
+  gybed: 1,
+  broached: 1,
+  'left-valid-range': 1,
+  'line-slack': 2,
+  'elastic-slack': 2,
+  'tiller-on-stop': 2,
+}
+
 /** Flags in order of time, a word on each that has room for it and says something new. */
 export function flagsOf(
   happenings: readonly Happening[],
   x: (timeS: number) => number,
   right: number,
 ): Flag[] {
-  let free = Number.NEGATIVE_INFINITY
-  return [...happenings]
+  const taken: { from: number; to: number }[] = []
+  const flags = happenings
+    .map(({ atS, code }): Flag => ({ x: x(atS), atS, code, word: undefined }))
     .sort((a, b) => a.atS - b.atS)
-    .map(({ atS, code }) => {
-      const at = x(atS)
-      const word = words[code]
-      const end = at + 18 + word.length * letterPx
-      const fits = at > free && end < right
-      if (fits) free = end
-      return { x: at, atS, code, word: fits ? word : undefined }
-    })
+  for (const flag of flags.toSorted((a, b) => rank[a.code] - rank[b.code])) {
+    const word = words[flag.code]
+    const place = { from: flag.x, to: flag.x + 18 + word.length * letterPx }
+    const free = taken.every(({ from, to }) => place.from > to || place.to < from)
+    if (!free || place.to >= right) continue
+    taken.push(place)
+    flag.word = word
+  }
+  return flags
 }

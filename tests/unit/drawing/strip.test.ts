@@ -160,6 +160,15 @@ describe('Labels', () => {
     expect(flags.map(({ x }) => x)).toEqual([100, 103, 300])
     expect(flags.map(({ word }) => word)).toEqual(['gust', undefined, 'reef'])
   })
+
+  test('what was dropped in has its word before what came of it', () => {
+    const happenings = [
+      { atS: 100, code: 'line-slack' as const, text: '' },
+      { atS: 130, code: 'gust' as const, text: '' },
+    ]
+    const flags = flagsOf(happenings, (timeS) => timeS, 900)
+    expect(flags.map(({ word }) => word)).toEqual([undefined, 'gust'])
+  })
 })
 
 describe('Strip in words', () => {
