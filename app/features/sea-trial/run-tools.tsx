@@ -81,7 +81,7 @@ export function RunTools({ history, run, dispatch }: Props) {
           <label key={ghost} className="flex h-touch items-center gap-2">
             <input
               type="checkbox"
-              className="size-5 appearance-none border border-ink checked:border-6"
+              className="size-5 appearance-none border border-ink checked:border-2 checked:bg-ink"
               checked={present.ghosts.includes(ghost)}
               onChange={() => dispatch({ type: 'run', ghosts: toggled(present.ghosts, ghost) })}
             />

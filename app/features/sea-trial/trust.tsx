@@ -194,7 +194,7 @@ function Question({ title, text, button, running, onAsk, onStop, children }: Que
           {button}
         </Button>
       )}
-      <div role="status" className="mt-2 min-h-10">
+      <div role="status" className="mt-2">
         {children}
       </div>
     </div>

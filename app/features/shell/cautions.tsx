@@ -24,7 +24,11 @@ const cautions = [
 /** In view at the foot of the drawing sheet, as the notes of a working drawing are. */
 export function Cautions() {
   return (
-    <section aria-label="Cautions" className="border-t border-hair px-4 py-4 md:px-margin">
+    <section
+      id="cautions"
+      aria-label="Cautions"
+      className="border-t border-hair px-4 py-4 md:px-margin"
+    >
       <p className="text-note font-strong">
         This steers no boat. It computes, ashore, what a boat of these dimensions would do; local
         rules and qualified instruction come first.

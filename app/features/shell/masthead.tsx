@@ -33,6 +33,12 @@ export function Masthead({ inHand }: { inHand?: InHand }) {
             <span className="text-ink">{inHand.boat}</span>, {inHand.setup}, {inHand.weather}
           </p>
         )}
+        <a
+          href="#cautions"
+          className="flex min-h-6 items-center underline underline-offset-4 max-lg:order-last max-lg:basis-full max-lg:pb-2 lg:min-h-touch"
+        >
+          Steers no boat: keep a look-out
+        </a>
         <Folded title="Light and units">
           <PreferencesForm />
         </Folded>
@@ -43,7 +49,7 @@ export function Masthead({ inHand }: { inHand?: InHand }) {
 
 function Folded({ title, children }: { title: string; children: ReactNode }) {
   return (
-    <details className="group ml-auto open:order-last open:basis-full open:pb-3">
+    <details className="ml-auto open:basis-full open:pb-3">
       <summary className="flex h-touch cursor-pointer list-none items-center underline underline-offset-4 [&::-webkit-details-marker]:hidden">
         {title}
       </summary>

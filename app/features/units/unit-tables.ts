@@ -3,7 +3,7 @@ import type { StoredUnit } from 'sim/parameters/define'
 import type { Entry } from '~/ui/types'
 import type { Term } from './entry'
 
-const tables = create({ unitDependencies, createUnitDependencies })
+const tables = create({ ...unitDependencies, ...createUnitDependencies })
 tables.createUnit('knot', '0.514444444444444444 m/s')
 tables.createUnit('mileperhour', '0.44704 m/s')
 
