@@ -13,7 +13,7 @@ import {
   timeAt,
   tracesOf,
 } from './strip-scales'
-import { tracePath } from './trace-path'
+import { straight, tracePath } from './trace-path'
 import type { Ghost, Measures, Run, StripProps } from './types'
 
 const noGhosts: readonly Ghost[] = []
@@ -255,8 +255,8 @@ function pathOn(run: Run, layout: StripLayout, panel: Panel, trace: Trace): stri
   return tracePath(
     run.result.series.timeS,
     trace.values,
-    layout.x,
-    panel.y,
+    straight(layout.x),
+    straight(panel.y),
     panel.plot === 'course' ? Math.abs(panel.y(180) - panel.y(0)) : undefined,
   )
 }

@@ -2,6 +2,13 @@ import { line } from 'd3-shape'
 
 const path = line<[number, number]>().digits(1)
 
+/** A linear scale without its ceremony: thousands of samples go through it at every change. */
+export function straight(scale: (value: number) => number): (value: number) => number {
+  const origin = scale(0)
+  const perUnit = scale(1) - origin
+  return (value) => origin + perUnit * value
+}
+
 /**
  * A trace as path data. Where several samples share a pixel column only the lowest and the highest
  * are kept: the ink is the same and the path stays short. A jump of more than
@@ -39,10 +46,15 @@ export function keptSamples(
     if (kept[kept.length - 1] !== index) kept.push(index)
   }
   let start = 0
+  let next = Math.floor(x(times[0] ?? 0))
   while (start < times.length) {
-    const column = Math.floor(x(times[start] ?? 0))
-    let [end, low, high] = [start, start, start]
-    while (end + 1 < times.length && Math.floor(x(times[end + 1] ?? 0)) === column) {
+    let end = start
+    let low = start
+    let high = start
+    const column = next
+    while (end + 1 < times.length) {
+      next = Math.floor(x(times[end + 1] ?? 0))
+      if (next !== column) break
       end++
       if ((values[end] ?? 0) < (values[low] ?? 0)) low = end
       if ((values[end] ?? 0) > (values[high] ?? 0)) high = end

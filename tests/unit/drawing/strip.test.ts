@@ -3,7 +3,7 @@ import { momentAt, sampleAt } from '~/drawing/moment'
 import { readings } from '~/drawing/readings'
 import { flagsOf, spread } from '~/drawing/strip-labels'
 import { courseOnTack, stripLayout, timeAt } from '~/drawing/strip-scales'
-import { keptSamples, tracePath } from '~/drawing/trace-path'
+import { keptSamples, straight, tracePath } from '~/drawing/trace-path'
 import type { Run } from '~/drawing/types'
 import { boatWith, measures, rigged, sailed } from './rigged'
 
@@ -121,6 +121,14 @@ describe('Trace', () => {
     expect(kept[kept.length - 1]).toBe(2399)
     expect(kept).toContain(1200)
     expect([...kept].sort((a, b) => a - b)).toEqual(kept)
+  })
+
+  test('goes through a straight scale to where the scale itself would put it', () => {
+    const { x: scale, panels } = stripLayout(run(), measures, { width: 900, height: 400 })
+    for (const value of [-40, 0, 0.3, 61, 600]) {
+      expect(straight(scale)(value)).toBeCloseTo(scale(value), 6)
+      for (const { y } of panels) expect(straight(y)(value)).toBeCloseTo(y(value), 6)
+    }
   })
 
   test('draws every sample where each has a pixel of its own', () => {
