@@ -11,6 +11,8 @@ export default defineConfig({
     ssr: { build: { rollupOptions: { input: './app/server/app.ts' } } },
   },
   optimizeDeps: {
+    // Named in route modules, yet only loaders use them, which do not reach the browser.
+    exclude: ['drizzle-orm', 'pg', 'pino'],
     include: [
       '@tanstack/react-query',
       'comlink',

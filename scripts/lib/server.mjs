@@ -1,14 +1,17 @@
 import { fork } from 'node:child_process'
 import { fileURLToPath } from 'node:url'
-import { addressTrouble } from './addresses.mjs'
+import { addressTrouble, checkAddress, urlOf } from './addresses.mjs'
+import { untilStopRequested } from './signals.mjs'
+import { seconds, step } from './steps.mjs'
 import { Trouble } from './trouble.mjs'
 
 /** The web server, in a process of its own so that it can be stopped even when it is too busy. */
 
-const script = fileURLToPath(new URL('../serve.mjs', import.meta.url))
 const patienceMs = 8000
 
 /**
+ * @typedef {'build' | 'sources'} Kind what is served, by the script of that name
+ * @typedef {{ host: string, port: number }} Place
  * @typedef {{ listening: number } | { failed: string, code: string }} Report
  * @typedef {object} Server
  * @property {number} port
@@ -17,19 +20,46 @@ const patienceMs = 8000
  */
 
 /**
- * @param {{ folder: string, host: string, port: number, databaseUrl: string }} settings
+ * Prepares, serves, and goes on until it is asked to stop.
+ * @param {Kind} kind
+ * @param {Place} place
+ * @param {() => Promise<NodeJS.ProcessEnv>} prepare gives what the server needs to know
+ * @returns {Promise<number>} the exit code
+ */
+export async function serve(kind, { host, port }, prepare) {
+  const began = performance.now()
+  if (port !== 0) await checkAddress(host, port)
+  const env = await prepare()
+  const server = await step(
+    'Server',
+    () => startServer(kind, { host, port }, env),
+    () => 'started',
+  )
+  const url = urlOf(host, server.port)
+  process.stdout.write(`Counterhelm is at ${url} after ${seconds(began)}. Ctrl-C stops it.\n`)
+  const end = await Promise.race([untilStopRequested(), server.ended])
+  if (end === undefined) await server.stop()
+  else if (end !== null) throw new Trouble(`The server was ended by ${end}.`)
+  process.stdout.write('Stopped.\n')
+  return 0
+}
+
+/**
+ * @param {Kind} kind
+ * @param {Place} place
+ * @param {NodeJS.ProcessEnv} env
  * @returns {Promise<Server>}
  */
-export async function startServer({ folder, host, port, databaseUrl }) {
+export async function startServer(kind, { host, port }, env) {
+  const script = fileURLToPath(new URL(`../servers/${kind}.mjs`, import.meta.url))
   const child = fork(script, {
     detached: true,
     env: {
       ...process.env,
-      NODE_ENV: 'production',
+      NODE_ENV: kind === 'build' ? 'production' : 'development',
       HOST: host,
       PORT: String(port),
-      DATABASE_URL: databaseUrl,
-      BUILD_FOLDER: folder,
+      ...env,
     },
   })
   /** @type {Promise<string | null>} */
