@@ -10,8 +10,8 @@ export function straight(scale: (value: number) => number): (value: number) => n
 }
 
 /**
- * A trace as path data. Where several samples share a pixel column only the lowest and the highest
- * are kept: the ink is the same and the path stays short. A jump of more than
+ * A trace as path data. Where several samples share a column of paper, as wide as the ink, only the
+ * lowest and the highest are kept: the ink is the same and the path stays short. A jump of more than
  * `breakAt` pixels lifts the pen (a course that comes round through the stern).
  */
 export function tracePath(
@@ -35,6 +35,9 @@ export function tracePath(
   return data + (path(stroke) ?? '')
 }
 
+/** As wide as the ink of a trace, pixels. */
+const columnPx = 2
+
 /** Indices of the samples that make a difference on paper, in order. */
 export function keptSamples(
   times: Float64Array,
@@ -46,14 +49,15 @@ export function keptSamples(
     if (kept[kept.length - 1] !== index) kept.push(index)
   }
   let start = 0
-  let next = Math.floor(x(times[0] ?? 0))
+  const columnOf = (index: number) => Math.floor(x(times[index] ?? 0) / columnPx)
+  let next = columnOf(0)
   while (start < times.length) {
     let end = start
     let low = start
     let high = start
     const column = next
     while (end + 1 < times.length) {
-      next = Math.floor(x(times[end + 1] ?? 0))
+      next = columnOf(end + 1)
       if (next !== column) break
       end++
       if ((values[end] ?? 0) < (values[low] ?? 0)) low = end

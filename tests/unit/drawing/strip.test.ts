@@ -116,7 +116,7 @@ describe('Trace', () => {
 
   test('keeps every extreme and both ends of a long run on few points', () => {
     const kept = keptSamples(times, values, x)
-    expect(kept.length).toBeLessThanOrEqual(2 * 301 + 2)
+    expect(kept.length).toBeLessThanOrEqual(2 * 151 + 2)
     expect(kept[0]).toBe(0)
     expect(kept[kept.length - 1]).toBe(2399)
     expect(kept).toContain(1200)
