@@ -108,6 +108,16 @@ export const trialEventSchema = z.discriminatedUnion('kind', [
     angleDeg: z.number().min(-90).max(90),
     durationS,
   }),
-  z.strictObject({ atS, kind: z.literal('wave-set'), heightM: z.number().min(0).max(4), durationS }),
-  z.strictObject({ atS, kind: z.literal('reef'), sail: sailId, percent: z.number().min(0).max(70) }),
+  z.strictObject({
+    atS,
+    kind: z.literal('wave-set'),
+    heightM: z.number().min(0).max(4),
+    durationS,
+  }),
+  z.strictObject({
+    atS,
+    kind: z.literal('reef'),
+    sail: sailId,
+    percent: z.number().min(0).max(70),
+  }),
 ])

@@ -33,6 +33,8 @@ export interface Happening {
 
 export interface Metrics {
   holds: boolean
+  /** Until she tacked, gybed, broached or was knocked flat, or the whole run. */
+  lastedS: number
   meanCourseToWindDeg: number
   rmsCourseErrorDeg: number
   maxCourseErrorDeg: number
@@ -72,12 +74,24 @@ export interface Band {
   halfWidthDeg: number
 }
 
+/** The steady state a run starts from. */
+export interface BalanceSummary {
+  found: boolean
+  speedKn: number
+  heelDeg: number
+  leewayDeg: number
+  tillerDeg: number
+  /** Moment of the water on the rudder, positive when it turns the tiller to starboard. */
+  rudderMomentNm: number
+}
+
 export interface TrialResult {
   modelVersion: string
   verdict: Verdict
   metrics: Metrics
   happenings: Happening[]
   band: Band
+  balance: BalanceSummary
   series: Series
   /** Boom or clew angle of each sail set, degrees, positive with the clew to starboard. */
   boomDeg: Record<string, Float64Array>

@@ -1,0 +1,257 @@
+import { DEGREE, GRAVITY } from '../constants'
+import { liftSlope, turnDamping } from '../foils/section'
+import { addedMass } from '../hull/added-mass'
+import { HIGHEST_FROUDE, hullResistance } from '../hull/resistance'
+import type { Plan } from '../plan/types'
+import { type SailCurve, sailCurve } from '../sails/coefficients'
+import { clothAngle, HEADSAIL_SHEET_SHARE, LEAST_ACROSS, sheetAcross } from '../sails/sheet'
+import { windProfile } from '../wind/profile'
+import { type ControlLine, controlLineOf } from './control-line'
+
+/** Slope of a forestay, horizontal over vertical; usual triangles lie near .31. */
+const FORESTAY_RAKE = 0.31
+/** Height of the centre of effort over the luff; triangles .33, with roach and gap near .4. */
+const EFFORT_HEIGHT = 0.39
+/** Chord on which the centre of pressure is placed, over the mean chord: the integral of c^2 over that of c, 4/3 for a triangle. */
+const MOMENT_CHORD = 4 / 3
+/** Spacing of the resistance table, m/s. */
+const SPEED_STEP = 0.05
+
+export type SailHold = 'sheet' | 'fixed'
+
+/** One sail set, in SI and on the tack sailed. */
+export interface VesselSail {
+  id: string
+  kind: 'main' | 'headsail' | 'mizzen' | 'steering'
+  area: number
+  /** Luff at the height of the centre of effort, forward of the centre of gravity, m. */
+  luffFromCentre: number
+  /** Gooseneck or tack forward of the rudder stock, m. */
+  luffX: number
+  /** Chord on which the centre of pressure is placed, m. */
+  chord: number
+  luffLength: number
+  footZ: number
+  effortHeight: number
+  reach: number
+  curve: SailCurve
+  /** Wind at the centre of effort over that at 10 m. */
+  profile: number
+  /** How far out the sheet lets the boom go, rad, not negative. */
+  limit: number
+  hold: SailHold
+  /** Boom angle at which a fixed sail is held, rad, positive to starboard. */
+  heldAt: number
+  /** Share of the sheet's length that works across the boom. */
+  across: number
+  /** Sheet tension per part over the sail's moment about its luff, 1/m. */
+  tensionOverMoment: number
+  parts: number
+  sheetX: number
+  sheetY: number
+  sheetZ: number
+}
+
+/** A plan turned into the numbers the derivative needs: SI, body frame, on the tack sailed. */
+export interface Vessel {
+  /** +1 on the starboard tack, -1 on port. */
+  tack: 1 | -1
+  mass: number
+  surgeMass: number
+  swayMass: number
+  rollInertia: number
+  yawInertia: number
+  munkMass: number
+  gm: number
+  vanishing: number
+  rollDamping: number
+  length: number
+  draught: number
+  /** Upright resistance, N, at multiples of speedStep. */
+  resistance: Float64Array
+  speedStep: number
+  heelYawLever: number
+  keel: Foil & {
+    /** Where its incidence is felt: three quarters of the chord, forward of the centre of gravity, m. */
+    feltX: number
+    /** Moment against turning over speed and yaw rate, kg m. */
+    turnDamping: number
+  }
+  rudder: Foil & {
+    chord: number
+    skegArea: number
+    balance: number
+    stop: number
+    friction: number
+    inertia: number
+    speedRatio: number
+    leewayRatio: number
+  }
+  /** Drag area of hull and rigging ahead and abeam, m^2, and its height. */
+  windageAhead: number
+  windageAbeam: number
+  windageHeight: number
+  centreX: number
+  sails: VesselSail[]
+  line: ControlLine
+  /** Index in sails of the sail whose sheet gives the pull, or -1 when it is stowed. */
+  source: number
+}
+
+export interface Foil {
+  area: number
+  slope: number
+  aspect: number
+  /** Forward of the centre of gravity, m. */
+  x: number
+  /** Depth of the centre of pressure, m. */
+  depth: number
+}
+
+/** Wind at 10 m for which the profile's slope is taken, m/s; it varies little. */
+const PROFILE_WIND = 6
+
+export function vesselOf(plan: Plan): Vessel {
+  const { boat, setup } = plan
+  const { hull, keel, rudder } = boat
+  const tack = setup.conditions.trueWindAngleDeg < 0 ? -1 : 1
+  const mass = hull.displacement
+  const rollOwn = mass * (hull.rollRadiusRatio * hull.beamOverall) ** 2
+  const yawOwn = mass * (hull.yawRadiusRatio * hull.lengthOverall) ** 2
+  const added = addedMass(hull.waterlineLength, hull.canoeBodyDraught, mass, rollOwn)
+  const rollInertia = rollOwn + added.roll
+  const keelDepth = hull.canoeBodyDraught + keel.span
+  const keelArea = (keel.area * keelDepth) / keel.span
+  const keelChord = keel.area / keel.span
+  const keelAspect = (2 * keelDepth * keelDepth) / keelArea
+  const keelSlope = liftSlope(keelAspect, keel.sweepDeg * DEGREE)
+  const rudderAspect = (2 * rudder.span * rudder.span) / rudder.area
+  const sails = Object.entries(boat.sails).flatMap(([id]) => vesselSail(plan, id, tack) ?? [])
+  const source = sails.findIndex((sail) => sail.id === setup.source)
+  return {
+    tack,
+    mass,
+    surgeMass: mass + added.surge,
+    swayMass: mass + added.sway,
+    rollInertia,
+    yawInertia: yawOwn + added.yaw,
+    munkMass: added.sway - added.surge,
+    gm: hull.metacentricHeight,
+    vanishing: hull.vanishingAngleDeg * DEGREE,
+    rollDamping:
+      2 * hull.rollDampingRatio * Math.sqrt(mass * GRAVITY * hull.metacentricHeight * rollInertia),
+    length: hull.waterlineLength,
+    draught: hull.canoeBodyDraught,
+    resistance: resistanceTable(plan),
+    speedStep: SPEED_STEP,
+    heelYawLever: hull.heelYawArm * hull.waterlineLength,
+    // The keel carries its lift up through the hull: reckoned as if it reached the waterline
+    // (extended-keel method, Gerritsma 1971; centre of pressure at .43 of the depth).
+    keel: {
+      area: keelArea,
+      slope: keelSlope,
+      feltX: keel.x - keelChord / 2 - hull.centreOfGravityX,
+      turnDamping: turnDamping(keelSlope, keelChord, keelDepth),
+      aspect: keelAspect,
+      x: keel.x - hull.centreOfGravityX,
+      depth: 0.43 * keelDepth,
+    },
+    rudder: {
+      area: rudder.area,
+      slope: liftSlope(rudderAspect),
+      aspect: rudderAspect,
+      x: -hull.centreOfGravityX,
+      depth: 0.4 * hull.canoeBodyDraught + 0.45 * rudder.span,
+      chord: rudder.area / rudder.span,
+      skegArea: rudder.skegArea,
+      balance: rudder.balance,
+      stop: rudder.stopDeg * DEGREE,
+      friction: rudder.friction,
+      inertia: rudder.inertia,
+      speedRatio: rudder.speedRatio,
+      leewayRatio: rudder.leewayRatio,
+    },
+    windageAhead: 0.5 * hull.beamOverall * hull.freeboard + 0.08 * hull.lengthOverall,
+    windageAbeam: 0.8 * hull.lengthOverall * hull.freeboard + 0.1 * hull.lengthOverall,
+    windageHeight: hull.freeboard,
+    centreX: hull.centreOfGravityX,
+    sails,
+    line: controlLineOf(plan, sails[source], tack),
+    source,
+  }
+}
+
+/** A sail's area and height after taking in a part of it, percent: foot and luff shrink alike. */
+export function reefedArea(area: number, percent: number): number {
+  return area * (1 - percent / 100)
+}
+
+export function effortHeight(footZ: number, luff: number, percent: number): number {
+  return footZ + EFFORT_HEIGHT * luff * Math.sqrt(1 - percent / 100)
+}
+
+function vesselSail(plan: Plan, id: string, tack: 1 | -1): VesselSail | undefined {
+  const sail = plan.boat.sails[id]
+  const trim = plan.setup.trim[id]
+  if (!sail || !trim || trim.set === 'no') return undefined
+  const { hull } = plan.boat
+  const limit = trim.sheetAngleDeg * DEGREE
+  const windward = trim.held === 'pole' || trim.held === 'backed'
+  const heldAt = (windward ? tack : -tack) * limit
+  const height = effortHeight(sail.footZ, sail.luffLength, trim.reef)
+  // A clew held to windward has its sheet led down the windward side.
+  const sheetY = (windward ? tack : -tack) * sail.sheetY
+  const geometric = sheetAcross(
+    sail.luffX,
+    sail.sheetReach,
+    sail.footZ,
+    heldAt,
+    sail.sheetX,
+    sheetY,
+    sail.sheetZ,
+  )
+  const soft = sail.kind === 'headsail'
+  const across = Math.max(geometric, soft ? Math.sin(clothAngle(sail.camber)) : LEAST_ACROSS)
+  const rake = soft ? FORESTAY_RAKE * (height - sail.footZ) : 0
+  return {
+    id,
+    kind: sail.kind,
+    area: reefedArea(sail.area, trim.reef),
+    luffFromCentre: sail.luffX - rake - hull.centreOfGravityX,
+    luffX: sail.luffX,
+    chord: MOMENT_CHORD * (sail.area / sail.luffLength) * Math.sqrt(1 - trim.reef / 100),
+    luffLength: sail.luffLength,
+    footZ: sail.footZ,
+    effortHeight: height,
+    reach: sail.sheetReach,
+    curve: sailCurve(sail.luffLength, sail.area, sail.camber),
+    profile: windProfile(height, PROFILE_WIND),
+    limit,
+    hold: trim.held === 'sheet' ? 'sheet' : 'fixed',
+    heldAt,
+    across,
+    tensionOverMoment:
+      (soft ? HEADSAIL_SHEET_SHARE : 1) / (sail.sheetParts * sail.sheetReach * across),
+    parts: sail.sheetParts,
+    sheetX: sail.sheetX,
+    sheetY,
+    sheetZ: sail.sheetZ,
+  }
+}
+
+/** Upright resistance of the canoe body, N, at multiples of SPEED_STEP; the foils' friction is in their section drag. */
+function resistanceTable(plan: Plan): Float64Array {
+  const { hull } = plan.boat
+  const top = HIGHEST_FROUDE * Math.sqrt(GRAVITY * hull.waterlineLength)
+  const table = new Float64Array(Math.ceil(top / SPEED_STEP) + 2)
+  for (let i = 0; i < table.length; i++) {
+    table[i] = hullResistance(
+      i * SPEED_STEP,
+      hull.waterlineLength,
+      hull.wettedArea,
+      hull.displacement,
+      hull.residuaryFactor,
+    )
+  }
+  return table
+}

@@ -1,0 +1,171 @@
+/** Refusals of a plan before a run starts: every value in its range, and what only several values together tell. */
+import { checkValue, keysOf, parameterAt, readValue } from './keys'
+import type { Plan } from './types'
+
+export interface Problem {
+  key: string
+  given: unknown
+  message: string
+  min?: number
+  max?: number
+}
+
+interface Point {
+  x: number
+  y: number
+  z: number
+}
+
+/** Shortest distance at which two points of a line are still two points, m. */
+const LEAST_LENGTH = 0.03
+
+/** Everything that forbids a run, in the order of the parameters; empty when the plan may be sailed. */
+export function problemsOf(plan: Plan): Problem[] {
+  const single = outOfRange(plan)
+  // Geometry is only worth reading once each value by itself can be.
+  return single.length > 0 ? single : [...sailProblems(plan), ...lineProblems(plan)]
+}
+
+function outOfRange(plan: Plan): Problem[] {
+  const problems: Problem[] = []
+  for (const key of keysOf(plan)) {
+    const parameter = parameterAt(plan, key)
+    if (!parameter) continue
+    const given = readValue(plan, key)
+    const message = checkValue(key, parameter, given)
+    if (!message) continue
+    const range =
+      parameter.type === 'quantity' ? { min: parameter.min, max: parameter.max } : undefined
+    problems.push({ key, given, message, ...range })
+  }
+  return problems
+}
+
+function sailProblems({ boat, setup }: Plan): Problem[] {
+  const problems: Problem[] = []
+  if (setup.boatId !== boat.id) {
+    problems.push({
+      key: 'boatId',
+      given: setup.boatId,
+      message: `boatId must be the boat's own, ${boat.id}`,
+    })
+  }
+  for (const id of Object.keys(setup.trim)) {
+    if (!Object.hasOwn(boat.sails, id)) {
+      problems.push({ key: `trim.${id}`, given: id, message: `the boat has no sail called ${id}` })
+    }
+  }
+  const set = Object.keys(boat.sails).filter((id) => setup.trim[id]?.set === 'yes')
+  if (set.length === 0) {
+    problems.push({ key: 'trim', given: 'none', message: 'at least one sail must be set' })
+  }
+  if (!set.includes(setup.source)) {
+    problems.push({
+      key: 'source',
+      given: setup.source,
+      message: `source must be a sail that is set: ${set.join(', ')}`,
+    })
+  }
+  return problems
+}
+
+function lineProblems(plan: Plan): Problem[] {
+  const { boat, setup } = plan
+  const { line, elastic } = setup
+  const source = boat.sails[setup.source]
+  const trim = setup.trim[setup.source]
+  if (!source || !trim) return []
+  const problems: Problem[] = []
+  const limit = (key: string, given: number, min: number, max: number, why: string) => {
+    if (given >= min && given <= max) return
+    const range = `${round(min)} to ${round(max)} m`
+    problems.push({ key, given, message: `${key} must be from ${range}: ${why}`, min, max })
+  }
+  const reach = boat.tiller.length
+  limit('line.tillerRadius', line.tillerRadius, 0.1, reach, 'the tiller is no longer than that')
+  limit(
+    'elastic.tillerRadius',
+    elastic.tillerRadius,
+    0.1,
+    reach,
+    'the tiller is no longer than that',
+  )
+
+  const angle = (trim.sheetAngleDeg * Math.PI) / 180
+  const windward = trim.held === 'pole' || trim.held === 'backed' ? 1 : -1
+  const block = { x: source.sheetX, y: windward * source.sheetY, z: source.sheetZ }
+  const boom = {
+    x: source.luffX - source.sheetReach * Math.cos(angle),
+    y: windward * source.sheetReach * Math.sin(angle),
+    z: source.footZ,
+  }
+  const part = distance(block, boom)
+  if (line.pull === 'deflected') {
+    const most = 0.97 * part
+    limit(
+      'line.hitchDistance',
+      line.hitchDistance,
+      0.05,
+      most,
+      'the part of the sheet is no longer',
+    )
+    const hitch = between(block, boom, line.hitchDistance / part)
+    const toLead = distance(hitch, setup.leads[0] as Point)
+    limit(
+      'line.takeUp',
+      line.takeUp,
+      -0.5,
+      toLead - LEAST_LENGTH,
+      'the hitch would be hauled into its first lead',
+    )
+  }
+  const tiller = { x: line.tillerRadius, y: 0, z: boat.tiller.height }
+  const half = boat.hull.beamOverall / 2
+  setup.leads.forEach((lead, i) => {
+    limit(`leads.${i}.y`, lead.y, -half - 0.1, half + 0.1, 'a lead sits on the boat')
+    limit(`leads.${i}.x`, lead.x, -1.5, boat.hull.bowX, 'a lead sits on the boat')
+    limit(
+      `leads.${i}.z`,
+      lead.z,
+      boat.hull.freeboard - 0.5,
+      boat.hull.freeboard + 2,
+      'a lead sits on deck, coaming or rail, not through the hull',
+    )
+    const next = setup.leads[i + 1] ?? tiller
+    if (distance(lead, next) < LEAST_LENGTH) {
+      problems.push({
+        key: `leads.${i}.x`,
+        given: lead.x,
+        message: `lead ${i + 1} lies on the next point of the line: its length there would be nothing`,
+      })
+    }
+  })
+
+  const anchor = { x: elastic.anchorX, y: elastic.anchorY, z: elastic.anchorZ }
+  const span = distance(anchor, { x: elastic.tillerRadius, y: 0, z: boat.tiller.height })
+  const room = span - Math.max(elastic.stretch, 0)
+  limit(
+    'elastic.naturalLength',
+    elastic.naturalLength,
+    0.15,
+    room,
+    'stretched, it must fit between its anchor and the tiller',
+  )
+  return problems
+}
+
+function between(a: Point, b: Point, share: number): Point {
+  return {
+    x: a.x + share * (b.x - a.x),
+    y: a.y + share * (b.y - a.y),
+    z: a.z + share * (b.z - a.z),
+  }
+}
+
+function distance(a: Point, b: Point): number {
+  return Math.hypot(a.x - b.x, a.y - b.y, a.z - b.z)
+}
+
+function round(value: number): number {
+  return Math.round(value * 1000) / 1000
+}

@@ -1,0 +1,13 @@
+/**
+ * Bretschneider (two-parameter Pierson-Moskowitz) spectrum, m^2 s; its integral is Hs^2/16.
+ *
+ * @param omega rad/s
+ * @param height significant wave height, m
+ * @param peakPeriod s
+ * @source DNV-RP-C205, section 3.5.5
+ */
+export function bretschneider(omega: number, height: number, peakPeriod: number): number {
+  const peak = (2 * Math.PI) / peakPeriod
+  const ratio = (peak / omega) ** 4
+  return ((5 / 16) * height * height * ratio * Math.exp(-1.25 * ratio)) / omega
+}
