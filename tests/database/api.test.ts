@@ -367,9 +367,10 @@ function pathsIn(node: unknown, above: string[] = []): string[][] {
 function replacedAt(node: unknown, path: string[], value: unknown): unknown {
   const [step, ...rest] = path
   if (step === undefined) return value
-  const copy: Record<string, unknown> = Array.isArray(node)
-    ? Object.assign([], node)
-    : { ...(node as object) }
+  const copy = (Array.isArray(node) ? [...node] : { ...(node as object) }) as Record<
+    string,
+    unknown
+  >
   copy[step] = replacedAt(copy[step], rest, value)
   return copy
 }
