@@ -14,12 +14,12 @@ const environmentSchema = z.object({
     protocol: /^postgres(ql)?$/,
     error: 'must be the address of a PostgreSQL database, such as postgres://user@host:5432/name',
   }),
-  /** Runs computed at the same time; one processor is left to answer requests. */
-  TRIAL_THREADS: whole(1, 64).default(Math.max(1, availableParallelism() - 1)),
+  /** Runs asked for over HTTP that are computed at the same time. */
+  TRIAL_THREADS: whole(1, 64).default(availableParallelism()),
   /** Runs that may wait for a free thread before further ones are turned away. */
   TRIAL_QUEUE: whole(0, 1000).default(16),
   /** From a request's arrival to the moment its run is given up. */
-  TRIAL_TIMEOUT_S: whole(1, 600).default(60),
+  TRIAL_TIMEOUT_S: whole(1, 600).default(180),
 })
 
 export type Environment = z.infer<typeof environmentSchema>

@@ -258,6 +258,11 @@ describe('refusing', () => {
     ['half a seed', { ...short, seeds: 1.5 }, 'seeds'],
     ['too many seeds', { ...short, seeds: 51 }, 'seeds'],
     ['seeds past the last', { ...short, seeds: 2, conditions: { seed: 2147483647 } }, 'seeds'],
+    [
+      'more adaptive runs than there is time for',
+      { ...short, solver: 'adaptive', durationS: 3600, outputIntervalS: 1, seeds: 3 },
+      'seeds',
+    ],
     ['an unknown solver', { ...short, solver: 'exact' }, 'solver'],
     ['an unknown helm', { ...short, helm: 'hand' }, 'helm'],
     ['a storm', { ...short, conditions: { trueWindSpeedKn: 90 } }, 'conditions.trueWindSpeedKn'],

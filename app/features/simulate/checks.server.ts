@@ -54,10 +54,17 @@ function outputErrors({ durationS, outputIntervalS }: SimulateRequest): FieldErr
   return [{ field: 'outputIntervalS', given: outputIntervalS, message, min, max }]
 }
 
-function seedErrors({ seeds }: SimulateRequest, plan: Plan): FieldError[] {
+function seedErrors({ seeds, solver, durationS }: SimulateRequest, plan: Plan): FieldError[] {
   const { seed } = plan.setup.conditions
-  const max = conditionParameters.seed.max - seed + 1
-  if (seeds <= max) return []
-  const message = `must be a whole number from 1 to ${max}, counted from seed ${seed}`
-  return [{ field: 'seeds', given: seeds, message, min: 1, max }]
+  const errors: FieldError[] = []
+  const limit = (max: number, why: string) => {
+    if (seeds <= max) return
+    const message = `must be a whole number from 1 to ${max}, ${why}`
+    errors.push({ field: 'seeds', given: seeds, message, min: 1, max })
+  }
+  limit(conditionParameters.seed.max - seed + 1, `counted from seed ${seed}`)
+  if (solver === 'adaptive') {
+    limit(Math.floor(bounds.adaptiveS / durationS), `for adaptive runs of ${durationS} s`)
+  }
+  return errors
 }

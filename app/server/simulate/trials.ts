@@ -2,30 +2,36 @@ import { Worker } from 'node:worker_threads'
 import type { TrialRequest, TrialResult } from 'sim/trial/types'
 import { environment } from '../environment'
 import { onePerProcess } from '../one-per-process'
-import type { Task } from './messages'
+import type { Answer, Task } from './messages'
 import { TrialPool } from './pool'
 import source from './thread?thread'
 
-function openPool(): TrialPool {
-  return new TrialPool(
-    () => new Worker(source, { eval: true, resourceLimits: { maxOldGenerationSizeMb: 512 } }),
-    {
-      threads: environment.TRIAL_THREADS,
-      queue: environment.TRIAL_QUEUE,
-      timeoutMs: environment.TRIAL_TIMEOUT_S * 1000,
-    },
+function openPool(name: string, threads: number): TrialPool {
+  const limits = {
+    threads,
+    queue: environment.TRIAL_QUEUE,
+    timeoutMs: environment.TRIAL_TIMEOUT_S * 1000,
+  }
+  const spawn = () =>
+    new Worker(source, { eval: true, resourceLimits: { maxOldGenerationSizeMb: 512 } })
+  return onePerProcess(
+    name,
+    () => new TrialPool(spawn, limits),
+    (earlier) => earlier.close(),
   )
 }
 
-const pool = onePerProcess('trials', openPool, (earlier) => earlier.close())
+// Pages have a thread of their own, so that none waits for someone's fifty runs.
+const forPages = openPool('trials-for-pages', 1)
+const forRequests = openPool('trials-for-requests', environment.TRIAL_THREADS)
 
-/** A run, computed on another thread. */
+/** The run a page opens with, computed on another thread. */
 export async function computeTrial(
   request: TrialRequest,
   signal?: AbortSignal,
 ): Promise<TrialResult> {
-  const { result } = await computeTrials(request, 1, signal)
-  return result
+  const [answer] = await forPages.run([{ request, want: 'result' }], signal)
+  return resultOf(answer)
 }
 
 /** A run and how many of the runs with this seed and the following ones hold. */
@@ -38,8 +44,13 @@ export async function computeTrials(
     const conditions = { ...request.conditions, seed: request.conditions.seed + nth }
     return { request: { ...request, conditions }, want: nth === 0 ? 'result' : 'held' }
   })
-  const [first, ...others] = await pool.run(tasks, signal)
-  if (!first || !('result' in first)) throw new Error('the first run came back without its traces')
+  const [first, ...others] = await forRequests.run(tasks, signal)
+  const result = resultOf(first)
   const otherHeld = others.filter((answer) => 'held' in answer && answer.held).length
-  return { result: first.result, held: otherHeld + (first.result.metrics.holds ? 1 : 0) }
+  return { result, held: otherHeld + (result.metrics.holds ? 1 : 0) }
+}
+
+function resultOf(answer: Answer | undefined): TrialResult {
+  if (answer && 'result' in answer) return answer.result
+  throw new Error('a run came back without its traces')
 }
