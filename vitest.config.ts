@@ -35,8 +35,21 @@ export default defineConfig({
         plugins,
         resolve,
         test: {
-          name: 'browser',
+          name: 'commands',
           sequence: { groupOrder: 2 },
+          include: ['tests/commands/**/*.test.ts'],
+          environment: 'node',
+          testTimeout: 60_000,
+          hookTimeout: 60_000,
+          fileParallelism: false,
+        },
+      },
+      {
+        plugins,
+        resolve,
+        test: {
+          name: 'browser',
+          sequence: { groupOrder: 3 },
           include: ['tests/browser/**/*.test.ts'],
           globalSetup: ['tests/browser/server.setup.ts'],
           environment: 'node',

@@ -9,8 +9,12 @@ import { refuseUnknownMethods } from './request-method'
 import { limitRequestBody } from './request-size'
 import { securityHeaders } from './security-headers'
 
-/** Everything between the socket and the routes; without built files when the bundler serves. */
-export function createApp({ clientFolder }: { clientFolder?: string } = {}) {
+/**
+ * Everything between the socket and the routes; without built files when the bundler serves. The
+ * routes are loaded here, so that what keeps them from working keeps the server from starting.
+ */
+export async function createApp({ clientFolder }: { clientFolder?: string } = {}) {
+  const build = await import('virtual:react-router/server-build')
   const app = express()
   app.disable('x-powered-by')
   app.use(logRequests)
@@ -20,7 +24,7 @@ export function createApp({ clientFolder }: { clientFolder?: string } = {}) {
   app.use(limitRequestBody)
   app.use(
     createRequestHandler({
-      build: () => import('virtual:react-router/server-build'),
+      build,
       getLoadContext(_request, response) {
         const context = new RouterContextProvider()
         context.set(nonceContext, response.locals.nonce)

@@ -10,7 +10,8 @@ await host(async (server) => {
     vite.middlewares(request, response, async () => {
       try {
         const { createApp } = await vite.ssrLoadModule('./app/server/app.ts')
-        createApp()(request, response)
+        const app = await createApp()
+        app(request, response)
       } catch (error) {
         if (error instanceof Error) vite.ssrFixStacktrace(error)
         process.stderr.write(`${error instanceof Error ? error.stack : error}\n`)
