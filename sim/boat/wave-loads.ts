@@ -47,6 +47,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
     slope[i] = ai * ki * Math.exp((-ki * vessel.draught) / 2)
   }
   const lateralMass = vessel.swayMass
+  const table = hullTable(vessel.rudder.x / halfLength)
   const loads: WaveLoads = {
     surge: 0,
     sway: 0,
@@ -71,20 +72,24 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
         const sd = sinDirection[i] as number
         const theta =
           ki * (north * cd + east * sd) - (omega[i] as number) * t + (phase[i] as number)
-        const c = Math.cos(theta)
-        const s = Math.sin(theta)
+        const turns = theta * TURNS_PER_RADIAN
+        const angle = (turns - Math.floor(turns)) * SINE_ROWS
+        const sineRow = Math.floor(angle)
+        const sineShare = angle - sineRow
+        const s = between(SINE, sineRow, sineShare)
+        const c = between(SINE, sineRow + SINE_ROWS / 4, sineShare)
         const cosMu = cd * cosPsi + sd * sinPsi
         const sinMu = sd * cosPsi - cd * sinPsi
+        // Everything that depends on q alone is read from the table, between its two nearest rows.
         const q = ki * halfLength * cosMu
-        const q2 = q * q
-        let even = 1 - q2 / 10
-        let odd = q / 5 - (q * q2) / 70
-        if (q2 > 0.04) {
-          const sq = Math.sin(q)
-          const bow = sq - q * Math.cos(q)
-          even = (3 * bow) / (q * q2)
-          odd = (3 * (3 * bow - q2 * sq)) / (q2 * q2)
-        }
+        const side = q < 0 ? -1 : 1
+        const place = Math.min(side * q, LARGEST_Q) * ROWS_PER_Q
+        const row = Math.floor(place)
+        const share = place - row
+        const even = between(table.even, row, share)
+        const odd = side * between(table.odd, row, share)
+        const cosShift = between(table.cosShift, row, share)
+        const sinShift = side * between(table.sinShift, row, share)
         const a = acceleration[i] as number
         surge += a * cosMu * even * s
         sway += a * sinMu * even * s
@@ -93,8 +98,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
         const w = (velocity[i] as number) * c
         ox += w * cosMu
         oy += w * sinMu
-        const shift = ki * vessel.rudder.x * cosMu
-        roy += (rudderVelocity[i] as number) * sinMu * Math.cos(theta + shift)
+        roy += (rudderVelocity[i] as number) * sinMu * (c * cosShift - s * sinShift)
         surface += (sea.amplitude[i] as number) * c
       }
       loads.surge = gain * vessel.mass * surge
@@ -108,4 +112,60 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
     },
   }
   return loads
+}
+
+/** Sine over a turn and a quarter, so that the cosine is read a quarter further on; linear between rows within 3e-7. */
+const SINE_ROWS = 4096
+const TURNS_PER_RADIAN = 1 / (2 * Math.PI)
+const SINE = Float64Array.from({ length: (5 * SINE_ROWS) / 4 + 2 }, (_, i) =>
+  Math.sin((2 * Math.PI * i) / SINE_ROWS),
+)
+
+/** Largest q kept: beyond it the hull spans many waves and feels next to nothing of them. */
+const LARGEST_Q = 24
+const ROWS_PER_Q = 64
+
+interface HullTable {
+  even: Float64Array
+  odd: Float64Array
+  /** Phase of the wave at the rudder against that at the centre of gravity. */
+  cosShift: Float64Array
+  sinShift: Float64Array
+}
+
+/** @param rudderShare place of the rudder over half the waterline length, negative aft */
+function hullTable(rudderShare: number): HullTable {
+  const rows = LARGEST_Q * ROWS_PER_Q + 2
+  const table: HullTable = {
+    even: new Float64Array(rows),
+    odd: new Float64Array(rows),
+    cosShift: new Float64Array(rows),
+    sinShift: new Float64Array(rows),
+  }
+  for (let i = 0; i < rows; i++) {
+    const q = i / ROWS_PER_Q
+    table.even[i] = hullEven(q)
+    table.odd[i] = hullOdd(q)
+    table.cosShift[i] = Math.cos(rudderShare * q)
+    table.sinShift[i] = Math.sin(rudderShare * q)
+  }
+  return table
+}
+
+/** E(q) = 3 (sin q - q cos q)/q^3, by its series near zero. */
+export function hullEven(q: number): number {
+  if (q < 0.2) return 1 - (q * q) / 10 + (q * q * q * q) / 280
+  return (3 * (Math.sin(q) - q * Math.cos(q))) / (q * q * q)
+}
+
+/** O(q) = -dE/dq, by its series near zero. */
+export function hullOdd(q: number): number {
+  if (q < 0.2) return q / 5 - (q * q * q) / 70
+  const bow = Math.sin(q) - q * Math.cos(q)
+  return (3 * (3 * bow - q * q * Math.sin(q))) / (q * q * q * q)
+}
+
+function between(column: Float64Array, row: number, share: number): number {
+  const low = column[row] as number
+  return low + share * ((column[row + 1] as number) - low)
 }
