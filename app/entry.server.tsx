@@ -2,10 +2,23 @@ import { PassThrough } from 'node:stream'
 import { createReadableStreamFromReadable } from '@react-router/node'
 import { isbot } from 'isbot'
 import { renderToPipeableStream } from 'react-dom/server'
-import { type EntryContext, type RouterContextProvider, ServerRouter } from 'react-router'
+import {
+  type EntryContext,
+  isRouteErrorResponse,
+  type RouterContextProvider,
+  ServerRouter,
+} from 'react-router'
 import { nonceContext } from '~/server/load-context'
+import { log } from '~/server/log'
 
 export const streamTimeout = 10_000
+
+/** What a loader or an action threw; the visitor sees the error page. */
+export function handleError(error: unknown, { request }: { request: Request }) {
+  if (request.signal.aborted || (isRouteErrorResponse(error) && error.status < 500)) return
+  const { pathname } = new URL(request.url)
+  log.error({ err: error, method: request.method, path: pathname }, 'a page failed')
+}
 
 export default function handleRequest(
   request: Request,
@@ -34,11 +47,12 @@ export default function handleRequest(
           pipe(body)
         },
         onShellError: reject,
-        onError() {
+        onError(error) {
           responseStatus = 500
+          log.error({ err: error }, 'a page could not be rendered')
         },
       },
     )
-    setTimeout(abort, streamTimeout + 1000)
+    setTimeout(abort, streamTimeout + 1000).unref()
   })
 }

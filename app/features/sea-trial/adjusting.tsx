@@ -1,8 +1,8 @@
 import { createContext, type Dispatch, useContext } from 'react'
 import type { Plan } from 'sim/plan/types'
 import type { Units } from '~/features/units/units'
-import type { Refusals } from './request'
 import type { Action } from './state'
+import type { Refusals } from './wording'
 
 export interface Adjusting {
   /** The setup as it is kept, and with what was changed. */

@@ -44,8 +44,10 @@ export async function openTrial(query: URLSearchParams, signal: AbortSignal): Pr
       `No setup is called “${asked.slice(0, 64)}”. ${plan.boat.name}, ${plan.setup.name} is shown in its place.`,
     )
   }
-  const wanted = requestOf(state, plan)
-  const sketched = Object.keys(refusalsOf(wanted)).length === 0 ? state : startOf(plan.setup.id)
+  // The adaptive solver is left to the visitor's own machine.
+  const wanted: TrialState = { ...state, solver: 'fixed-step' }
+  const runnable = refusalsOf(requestOf(wanted, plan)).length === 0
+  const sketched = runnable ? wanted : startOf(plan.setup.id)
   const result = await computed(requestOf(sketched, plan), signal)
   return {
     entries,

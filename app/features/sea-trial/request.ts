@@ -1,4 +1,4 @@
-import { problemsOf } from 'sim/plan/problems'
+import { type Problem, problemsOf } from 'sim/plan/problems'
 import type { Plan } from 'sim/plan/types'
 import type { TrialRequest } from 'sim/trial/types'
 import { changedPlan } from './address'
@@ -21,9 +21,7 @@ export function requestOf(state: TrialState, kept: Plan): TrialRequest {
   }
 }
 
-export type Refusals = Readonly<Record<string, string>>
-
-/** Why a request cannot be run, by parameter key; empty when it can. */
-export function refusalsOf({ plan }: TrialRequest): Refusals {
-  return Object.fromEntries(problemsOf(plan).map(({ key, message }) => [key, message]))
+/** What forbids running a request as it is set; empty when it can be run. */
+export function refusalsOf({ plan }: TrialRequest): Problem[] {
+  return problemsOf(plan)
 }

@@ -7,6 +7,8 @@ import { type Action, allGhosts, durationsS, type Ghost, type History } from './
 import { helmNames } from './title-block'
 import { ghostLabels } from './use-trial'
 
+const solverNames = { 'fixed-step': 'fixed, quick', adaptive: 'adaptive, slow' } as const
+
 interface Props {
   history: History
   run: Run
@@ -56,6 +58,22 @@ export function RunTools({ history, run, dispatch }: Props) {
         >
           {Object.entries(helmNames).map(([helm, name]) => (
             <option key={helm} value={helm}>
+              {name}
+            </option>
+          ))}
+        </select>
+      </label>
+      <label className="flex items-center gap-2 text-ink-soft">
+        Steps
+        <select
+          className="h-touch bg-paper text-ink"
+          value={present.solver}
+          onChange={(event) =>
+            dispatch({ type: 'run', solver: event.target.value as keyof typeof solverNames })
+          }
+        >
+          {Object.entries(solverNames).map(([solver, name]) => (
+            <option key={solver} value={solver}>
               {name}
             </option>
           ))}

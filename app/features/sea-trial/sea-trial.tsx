@@ -27,7 +27,7 @@ import { useTrial } from './use-trial'
 import { useTrialState } from './use-trial-state'
 import { Verdict } from './verdict'
 import { Weather } from './weather'
-import { weatherInWords } from './wording'
+import { refusalsInWords, weatherInWords } from './wording'
 
 interface Props {
   entries: SetupEntry[]
@@ -54,7 +54,10 @@ export function SeaTrial(opening: Props) {
   )
 
   const request = useMemo(() => requestOf(state, kept), [state, kept])
-  const refusals = useMemo(() => refusalsOf(request), [request])
+  const refusals = useMemo(
+    () => refusalsInWords(refusalsOf(request), request.plan, units),
+    [request, units],
+  )
   const runnable = arrived && Object.keys(refusals).length === 0
   const [first] = useState(() => ({
     request: requestOf(opening.sketched, opening.plan),

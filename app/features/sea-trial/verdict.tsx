@@ -1,5 +1,5 @@
 import type { Run } from '~/drawing/types'
-import type { Refusals } from './request'
+import type { Refusals } from './wording'
 
 interface Props {
   run: Run

@@ -1,5 +1,7 @@
+import { parameterAt } from 'sim/plan/keys'
+import type { Problem } from 'sim/plan/problems'
 import type { Conditions, Plan, TrialEvent } from 'sim/plan/types'
-import { inWords, rounded, type Units } from '~/features/units/units'
+import { inWords, reading, rounded, type Units } from '~/features/units/units'
 
 /** "12 kn, 60° starboard tack". */
 export function weatherInWords(conditions: Conditions, units: Units): string {
@@ -45,4 +47,30 @@ export function eventInWords(event: TrialEvent, plan: Plan, units: Units): strin
       return `${sail} reefed to ${100 - event.percent} %`
     }
   }
+}
+
+/** Refusals by parameter key, each naming the control and its range in the visitor's units. */
+export type Refusals = Readonly<Record<string, string>>
+
+export function refusalsInWords(problems: readonly Problem[], plan: Plan, units: Units): Refusals {
+  return Object.fromEntries(
+    problems.map((problem) => [problem.key, refusalInWords(problem, plan, units)]),
+  )
+}
+
+function refusalInWords({ key, message, min, max }: Problem, plan: Plan, units: Units): string {
+  const parameter = parameterAt(plan, key)
+  if (!parameter) return sentence(message)
+  if (parameter.type === 'choice' || min === undefined || max === undefined) {
+    return `${parameter.label}: ${message.replace(`${key} `, '')}.`
+  }
+  const { label, unit, step } = parameter
+  const [, why] = message.split(': ')
+  const shown = (value: number) => reading(unit, value, units, step)
+  const range = `between ${shown(min).figure} and ${inWords(shown(max))}`
+  return `${label}: ${range}${why ? `, ${why}` : ''}.`
+}
+
+function sentence(text: string): string {
+  return `${text.charAt(0).toUpperCase()}${text.slice(1)}.`
 }
