@@ -15,6 +15,7 @@ export default defineConfig({
           name: 'node',
           sequence: { groupOrder: 0 },
           include: ['tests/{laws,outside,unit}/**/*.test.{ts,tsx}'],
+          benchmark: { include: ['tests/bench/**/*.bench.ts'] },
           environment: 'node',
           testTimeout: 60_000,
         },

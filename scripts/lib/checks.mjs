@@ -79,6 +79,21 @@ export async function runTests(args, env) {
 }
 
 /**
+ * @param {string[]} args file names or options for vitest
+ * @returns {Promise<number>} the exit code
+ */
+export async function benchmark(args) {
+  const options = ['bench', '--run', '--project=node', ...args]
+  try {
+    await run(bin('vitest'), options, { env: { ...process.env, ...colours }, show: true })
+    return 0
+  } catch (error) {
+    if (error instanceof ProgramFailed) return 1
+    throw error
+  }
+}
+
+/**
  * @typedef {object} Report
  * @property {number} numPassedTests
  * @property {number} numFailedTests
