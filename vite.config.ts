@@ -18,7 +18,7 @@ export default defineConfig({
       'comlink',
       'd3-scale',
       'd3-shape',
-      'mathjs/number',
+      'mathjs',
       'odex',
       'react',
       'react-dom',

@@ -28,7 +28,7 @@ export function PreferencesForm() {
               name={name}
               value={preferences[name]}
               onChange={() => undefined}
-              className="h-touch border-b border-ink bg-transparent pl-1 text-body font-strong text-ink [&>option]:bg-paper"
+              className="h-touch border-b border-ink pl-1 text-body font-strong text-ink"
             >
               {Object.entries(options).map(([value, text]) => (
                 <option key={value} value={value}>

@@ -35,7 +35,7 @@ export function PlayBar({ playback, verdict }: Props) {
       <label className="flex items-center gap-2 text-ink-soft">
         <span className="max-md:sr-only">Speed</span>
         <select
-          className="min-h-touch bg-paper px-1 text-ink"
+          className="min-h-touch text-ink"
           value={speed}
           onChange={(event) => playback.setSpeed(Number(event.target.value) as Speed)}
         >

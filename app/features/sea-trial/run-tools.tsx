@@ -1,9 +1,9 @@
 import { type Dispatch, useState } from 'react'
 import type { Run } from '~/drawing/types'
 import { Button } from '~/ui/button'
-import { linkQueryOf } from './address'
+import { linkQueryOf, queryOf } from './address'
 import { csvName, runAsCsv } from './export'
-import { type Action, allGhosts, durationsS, type Ghost, type History } from './state'
+import { type Action, allGhosts, durationsS, type Ghost, type History, startOf } from './state'
 import { helmNames } from './title-block'
 import { ghostLabels } from './use-trial'
 
@@ -18,7 +18,7 @@ interface Props {
 /** Taking back what was set. */
 export function StepTools({ history, dispatch }: Omit<Props, 'run'>) {
   const { present, past, future } = history
-  const untouched = Object.keys(present.changes).length === 0 && present.events.length === 0
+  const untouched = queryOf(present) === queryOf(startOf(present.setupId))
   return (
     <div className="steps flex flex-wrap items-end gap-x-4 md:justify-end">
       <Button weight="word" disabled={past.length === 0} onClick={() => dispatch({ type: 'undo' })}>
@@ -50,7 +50,7 @@ export function RunTools({ history, run, dispatch }: Props) {
       <label className="flex items-center gap-2 text-ink-soft">
         Helm
         <select
-          className="h-touch bg-paper text-ink"
+          className="h-touch text-ink"
           value={present.helm}
           onChange={(event) =>
             dispatch({ type: 'run', helm: event.target.value as keyof typeof helmNames })
@@ -66,7 +66,7 @@ export function RunTools({ history, run, dispatch }: Props) {
       <label className="flex items-center gap-2 text-ink-soft">
         Steps
         <select
-          className="h-touch bg-paper text-ink"
+          className="h-touch text-ink"
           value={present.solver}
           onChange={(event) =>
             dispatch({ type: 'run', solver: event.target.value as keyof typeof solverNames })
@@ -82,7 +82,7 @@ export function RunTools({ history, run, dispatch }: Props) {
       <label className="flex items-center gap-2 text-ink-soft">
         Length of the run
         <select
-          className="h-touch bg-paper text-ink"
+          className="h-touch text-ink"
           value={present.durationS}
           onChange={(event) => dispatch({ type: 'run', durationS: Number(event.target.value) })}
         >

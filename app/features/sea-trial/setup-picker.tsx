@@ -43,7 +43,7 @@ export function SetupPicker({ entries, setupId, units, onChoose }: Props) {
           name="setup"
           value={setupId}
           onChange={(event) => void choose(event.target.value)}
-          className="h-touch w-full border-b border-ink bg-transparent pl-1 text-body font-strong text-ink [&>optgroup]:bg-paper"
+          className="h-touch w-full border-b border-ink pl-1 text-body font-strong text-ink"
         >
           {grouped(entries).map(({ boat, setups }) => (
             <optgroup key={boat.id} label={`${boat.name}, ${boat.type}`}>

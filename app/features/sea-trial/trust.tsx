@@ -122,7 +122,7 @@ function OtherMachine({ run, state, units }: Props) {
   return (
     <Question
       title="Another machine"
-      text="The run drawn was computed by this browser. The server computes the same one from the same settings."
+      text="The run drawn was computed by this browser. The server computes it again; machines round the last figure differently, and a boat that is hard to steer makes much of it."
       button="Compare with the server"
       running={server.isPending}
       onAsk={() => server.mutate()}
