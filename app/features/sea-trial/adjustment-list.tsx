@@ -14,7 +14,7 @@ export function AdjustmentList() {
   const all = parts.map(({ key }) => key)
   const allOpen = all.every((key) => open.includes(key))
   return (
-    <section aria-labelledby="parts" className="px-4 py-6 md:px-margin">
+    <section aria-labelledby="parts" className="py-3">
       <div className="flex flex-wrap items-center justify-between gap-x-6">
         <h2 id="parts" className="text-head font-strong">
           Adjustments, part by part

@@ -18,7 +18,7 @@ export function EventList({ events, durationS }: Props) {
   const { plan, units, dispatch } = useAdjusting()
   if (events.length === 0) return null
   return (
-    <section aria-labelledby="events" className="border-t border-hair px-4 py-6 md:px-margin">
+    <section aria-labelledby="events" className="py-3">
       <h2 id="events" className="text-head font-strong">
         Dropped into the run
       </h2>

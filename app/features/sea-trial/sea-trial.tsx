@@ -125,12 +125,14 @@ export function SeaTrial(opening: Props) {
             />
             <RunTools history={history} run={run} dispatch={dispatch} />
           </div>
+          <div className="list">
+            <EventList events={state.events} durationS={state.durationS} />
+            <AdjustmentList />
+          </div>
           <div className="title">
             <TitleBlock run={run} units={units} date={date} />
           </div>
         </div>
-        <AdjustmentList />
-        <EventList events={state.events} durationS={state.durationS} />
         <Readings run={run} playback={playback} measures={measures} />
         <Trust run={run} state={state} units={units} />
         <PlayBar playback={playback} verdict={inView ? null : run.result.verdict.text} />

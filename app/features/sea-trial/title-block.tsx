@@ -32,7 +32,10 @@ export function TitleBlock({ run, units, date }: Props) {
       'Off it',
       `${angle(metrics.rmsCourseErrorDeg)} rms, ${angle(metrics.maxCourseErrorDeg)} at most`,
     ],
-    ['Within the band', `${Math.round(metrics.withinBandFraction * 100)} % of the time`],
+    [
+      `Within ${run.result.band.halfWidthDeg}° of it`,
+      `${Math.round(metrics.withinBandFraction * 100)} % of the time`,
+    ],
     ['Speed', `${speed(metrics.meanSpeedKn)}, ${speed(metrics.balanceSpeedKn)} in balance`],
     ['Heel', `${angle(metrics.maxHeelDeg)} at most`],
     [
