@@ -75,6 +75,7 @@ export function ErrorBoundary({ error }: Route.ErrorBoundaryProps) {
           </a>
         </p>
       </main>
+      <Cautions />
     </>
   )
 }

@@ -7,8 +7,11 @@ import type { TrialState } from './state'
 /** Fine enough to draw the roll in a short sea smoothly. */
 const OUTPUT_INTERVAL_S = 0.5
 
+/** The part of a state that determines the run. */
+type Asked = Omit<TrialState, 'setupId' | 'ghosts'>
+
 /** What a state asks of the model. */
-export function requestOf(state: TrialState, kept: Plan): TrialRequest {
+export function requestOf(state: Asked, kept: Plan): TrialRequest {
   const plan = changedPlan(kept, state.changes)
   return {
     plan,

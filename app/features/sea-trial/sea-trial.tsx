@@ -53,7 +53,11 @@ export function SeaTrial(opening: Props) {
     setRemarks,
   )
 
-  const request = useMemo(() => requestOf(state, kept), [state, kept])
+  const { changes, events, helm, solver, durationS } = state
+  const request = useMemo(
+    () => requestOf({ changes, events, helm, solver, durationS }, kept),
+    [changes, events, helm, solver, durationS, kept],
+  )
   const refusals = useMemo(
     () => refusalsInWords(refusalsOf(request), request.plan, units),
     [request, units],

@@ -61,7 +61,11 @@ function OtherSeeds({ run }: Props) {
     >
       {job.stage === 'running' && (
         <>
-          <progress max={SEEDS} value={progress.tried} className="h-3 w-full" />
+          <progress
+            max={SEEDS}
+            value={progress.tried}
+            className="h-3 w-full appearance-none border border-ink bg-transparent [&::-webkit-progress-bar]:bg-transparent [&::-webkit-progress-value]:bg-ink"
+          />
           <p>
             {progress.tried} of {SEEDS} sailed, {progress.held} held
           </p>
