@@ -3,6 +3,7 @@ import type { Plan } from 'sim/plan/types'
 import { usePreferences } from '~/features/preferences/use-preferences'
 import type { SetupEntry } from '~/features/setups/schema'
 import { Masthead } from '~/features/shell/masthead'
+import { Button } from '~/ui/button'
 import { queryOf } from './address'
 import { AdjustingProvider } from './adjusting'
 import { AdjustmentList } from './adjustment-list'
@@ -92,11 +93,19 @@ export function SeaTrial(opening: Props) {
       <main data-computing={computing || undefined} onPointerUp={letGo}>
         <h1 className="sr-only">Sea trial</h1>
         {remarks.length > 0 && (
-          <ul role="status" className="border-b border-ink px-4 py-2 text-note md:px-margin">
-            {remarks.map((remark) => (
-              <li key={remark}>{remark}</li>
-            ))}
-          </ul>
+          <div
+            role="status"
+            className="flex items-start justify-between gap-6 border-b border-ink px-4 text-note md:px-margin"
+          >
+            <ul className="py-3">
+              {remarks.map((remark) => (
+                <li key={remark}>{remark}</li>
+              ))}
+            </ul>
+            <Button weight="word" onClick={() => setRemarks([])}>
+              Close
+            </Button>
+          </div>
         )}
         <noscript>
           <p className="border-b border-ink px-4 py-2 text-note md:px-margin">
@@ -109,7 +118,10 @@ export function SeaTrial(opening: Props) {
             entries={entries}
             setupId={state.setupId}
             units={units}
-            onChoose={(setupId) => dispatch({ type: 'choose-setup', setupId })}
+            onChoose={(setupId) => {
+              setRemarks([])
+              dispatch({ type: 'choose-setup', setupId })
+            }}
           />
           <StepTools history={history} dispatch={dispatch} />
           <Weather />
