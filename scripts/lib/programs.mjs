@@ -6,6 +6,9 @@ import { root } from './root.mjs'
 import { stopRequested } from './signals.mjs'
 import { Stopped } from './trouble.mjs'
 
+/** How long a program that is told to stop may take; npm would finish installing first. */
+const patienceMs = 2000
+
 /** A program that ended with another code than 0, and what it wrote. */
 export class ProgramFailed extends Error {
   /**
@@ -45,7 +48,6 @@ export function run(program, args, options = {}) {
     const child = spawn(program, args, {
       cwd,
       env,
-      signal: shielded ? undefined : stopRequested,
       detached: shielded,
       stdio: ['ignore', 'pipe', 'pipe'],
     })
@@ -56,10 +58,15 @@ export function run(program, args, options = {}) {
         if (show) process[stream].write(text)
       })
     }
-    child.on('error', (error) => {
-      if (error.name !== 'AbortError') reject(error)
-    })
+    const stop = () => {
+      child.kill('SIGTERM')
+      setTimeout(() => child.kill('SIGKILL'), patienceMs).unref()
+    }
+    if (!shielded) stopRequested.addEventListener('abort', stop)
+    if (!shielded && stopRequested.aborted) stop()
+    child.on('error', reject)
     child.on('close', (code) => {
+      stopRequested.removeEventListener('abort', stop)
       try {
         if (log !== undefined) keepLog(log, output)
       } catch (error) {
