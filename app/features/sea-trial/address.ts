@@ -146,7 +146,10 @@ function takeValue(
   }
   const value = parameter.type === 'quantity' && text !== '' ? Number(text) : text
   const wrong = checkValue(key, parameter, value)
-  if (wrong) return `“${brief(text)}” in this link is left out: ${wrong}.`
+  if (wrong) {
+    const named = wrong.replace(key, parameter.label)
+    return `“${brief(text)}” in this link is left out: ${named}.`
+  }
   if (value !== readValue(draft.plan, key)) draft.changes[key] = value
   return null
 }

@@ -33,7 +33,7 @@ describe('the address', () => {
     await open(page, `/?setup=${setup}&trial=1~0.0.1~co.trWndSpdKn_14~li.tkUp_99~zz_1`)
     const remarks = page.getByRole('status').first()
     expect(await remarks.textContent()).toMatch(/made with model 0\.0\.1/)
-    expect(await remarks.textContent()).toMatch(/line\.takeUp must be from -0\.5 to 1\.8 m/)
+    expect(await remarks.textContent()).toMatch(/Line taken up must be from -0\.5 to 1\.8 m/)
     expect(await remarks.textContent()).toMatch(/“zz_1”, which this boat and setup do not have/)
     expect(await windBox(page).inputValue()).toBe('14.0')
   })
