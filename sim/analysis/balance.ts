@@ -28,6 +28,8 @@ const MARCH_TIME = 90
 const MARCH_STEP = 0.05
 const NEWTON_STEPS = 25
 const TOLERANCE = 1e-9
+/** Change of each unknown for the slopes, SI. */
+const NUDGE = 1e-6
 
 /**
  * Balance of a plan at its conditions' mean wind and asked course: calm water, steady wind, no control line or elastic
@@ -115,12 +117,16 @@ function polish(system: System, y: Float64Array, heading: number): number {
     if (!(residual > TOLERANCE)) break
     for (let j = 0; j < n; j++) {
       const place = unknowns[j] as number
-      const nudge = 1e-6
+      // Differences to both sides, so that port and starboard take the same steps.
       shifted.set(y)
-      shifted[place] = (y[place] as number) + nudge
+      shifted[place] = (y[place] as number) + NUDGE
+      system.derivative(0, shifted, dy)
+      for (let i = 0; i < n; i++) matrix[i * n + j] = dy[equations[i] as number] as number
+      shifted[place] = (y[place] as number) - NUDGE
       system.derivative(0, shifted, dy)
       for (let i = 0; i < n; i++) {
-        matrix[i * n + j] = ((dy[equations[i] as number] as number) + (right[i] as number)) / nudge
+        const rise = (matrix[i * n + j] as number) - (dy[equations[i] as number] as number)
+        matrix[i * n + j] = rise / (2 * NUDGE)
       }
     }
     if (!solve(matrix, right, n)) break
