@@ -53,7 +53,8 @@ function locate(plan: Plan, key: string): Address | undefined {
     const found = repeated[group]
     if (!found) return undefined
     const members = holder(plan[found.owner], [group])
-    if (!members || !Object.hasOwn(members, second)) return undefined
+    // Own names that can be listed: a list's length is no member of it.
+    if (!members || !Object.keys(members).includes(second)) return undefined
     return { ...found, path: [group, second], name: third }
   }
   return undefined
