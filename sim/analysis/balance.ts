@@ -3,6 +3,7 @@ import { BOOM, HEADING, HEEL, ROLL_RATE, RUDDER, SURGE, SWAY, YAW_RATE } from '.
 import { createSystem, type System } from '../boat/system'
 import { type Vessel, vesselOf } from '../boat/vessel'
 import { DEGREE, KNOT } from '../constants'
+import { atan2, hypot } from '../elementary'
 import { rungeKutta } from '../integrate/runge-kutta'
 import { clamp } from '../numbers'
 import type { Conditions, Plan } from '../plan/types'
@@ -60,9 +61,9 @@ export function balanceOf(plan: Plan): Balance {
   return {
     found: residual < 1e-6 && Math.abs(rudder) < vessel.rudder.stop,
     state: y,
-    speedKn: Math.hypot(u, y[SWAY] as number) / KNOT,
+    speedKn: hypot(u, y[SWAY] as number) / KNOT,
     heelDeg: (y[HEEL] as number) / DEGREE,
-    leewayDeg: Math.atan2(y[SWAY] as number, u) / DEGREE,
+    leewayDeg: atan2(y[SWAY] as number, u) / DEGREE,
     tillerDeg: -rudder / DEGREE,
     rudderMoment: system.observed.rudderMoment,
     sheetTension: system.observed.sheetTension,

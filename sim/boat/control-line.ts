@@ -1,3 +1,4 @@
+import { atan2, cos, hypot, sin } from '../elementary'
 import type { Plan } from '../plan/types'
 import { leadExponent } from '../steering/leads'
 import { ropeStrength } from '../steering/rope'
@@ -62,14 +63,14 @@ interface Point {
 export function turningAngle(from: Point, at: Point, to: Point): number {
   const a = { x: at.x - from.x, y: at.y - from.y, z: at.z - from.z }
   const b = { x: to.x - at.x, y: to.y - at.y, z: to.z - at.z }
-  const product = Math.hypot(a.x, a.y, a.z) * Math.hypot(b.x, b.y, b.z)
+  const product = hypot(a.x, a.y, a.z) * hypot(b.x, b.y, b.z)
   if (product === 0) return 0
   const cosine = (a.x * b.x + a.y * b.y + a.z * b.z) / product
-  return Math.acos(Math.min(1, Math.max(-1, cosine)))
+  return atan2(Math.sqrt(Math.max(0, 1 - cosine * cosine)), cosine)
 }
 
 function distance(a: Point, b: Point): number {
-  return Math.hypot(a.x - b.x, a.y - b.y, a.z - b.z)
+  return hypot(a.x - b.x, a.y - b.y, a.z - b.z)
 }
 
 export function controlLineOf(
@@ -88,8 +89,8 @@ export function controlLineOf(
     : { x: first.x, y: first.y - tack, z: first.z }
   const boom = source
     ? {
-        x: source.luffX - source.reach * Math.cos(source.heldAt),
-        y: source.reach * Math.sin(source.heldAt),
+        x: source.luffX - source.reach * cos(source.heldAt),
+        y: source.reach * sin(source.heldAt),
         z: source.footZ,
       }
     : { ...block, z: block.z + 1 }

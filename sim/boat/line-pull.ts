@@ -1,3 +1,4 @@
+import { cos, exp, hypot, sin } from '../elementary'
 import { pullOverTension } from '../steering/deflected-part'
 import type { ControlLine } from './control-line'
 
@@ -19,62 +20,82 @@ export interface LineSolver {
 
 const ITERATIONS = 5
 
+/** Undeflected hitch for one boom angle: ways to the held and the live end, unit way and distance to the first lead. */
+function createHitch() {
+  return {
+    boom: Number.NaN,
+    heldX: Number.NaN,
+    heldY: Number.NaN,
+    heldZ: Number.NaN,
+    liveX: Number.NaN,
+    liveY: Number.NaN,
+    liveZ: Number.NaN,
+    pullX: Number.NaN,
+    pullY: Number.NaN,
+    pullZ: Number.NaN,
+    toLead: Number.NaN,
+  }
+}
+
 /** The control line as a static chain: sheet part, hitch, leads with friction, stretch, tiller. */
 export function createLineSolver(line: ControlLine): LineSolver {
-  let ax = 0
-  let ay = 0
-  let az = 0
-  let bx = 0
-  let by = 0
-  let bz = 0
-  let ex = 0
-  let ey = 0
-  let ez = 0
-  let hitchToLead = 0
+  const hitch = createHitch()
 
-  /** Places the undeflected hitch for a boom angle. */
+  /** Places the undeflected hitch for a boom angle; asked twice in a row for the same, it is already there. */
   function place(boom: number): void {
-    const boomX = line.luffX - line.reach * Math.cos(boom)
-    const boomY = line.reach * Math.sin(boom)
+    if (hitch.boom === boom) return
+    hitch.boom = boom
+    const boomX = line.luffX - line.reach * cos(boom)
+    const boomY = line.reach * sin(boom)
     const hx = line.blockX + line.hitchShare * (boomX - line.blockX)
     const hy = line.blockY + line.hitchShare * (boomY - line.blockY)
     const hz = line.blockZ + line.hitchShare * (line.boomZ - line.blockZ)
-    ax = line.blockX - hx
-    ay = line.blockY - hy
-    az = line.blockZ - hz
-    bx = boomX - hx
-    by = boomY - hy
-    bz = line.boomZ - hz
-    ex = line.firstX - hx
-    ey = line.firstY - hy
-    ez = line.firstZ - hz
-    hitchToLead = Math.sqrt(ex * ex + ey * ey + ez * ez)
-    const inverse = hitchToLead > 0 ? 1 / hitchToLead : 0
-    ex *= inverse
-    ey *= inverse
-    ez *= inverse
+    hitch.heldX = line.blockX - hx
+    hitch.heldY = line.blockY - hy
+    hitch.heldZ = line.blockZ - hz
+    hitch.liveX = boomX - hx
+    hitch.liveY = boomY - hy
+    hitch.liveZ = line.boomZ - hz
+    const dx = line.firstX - hx
+    const dy = line.firstY - hy
+    const dz = line.firstZ - hz
+    hitch.toLead = hypot(dx, dy, dz)
+    const inverse = hitch.toLead > 0 ? 1 / hitch.toLead : 0
+    hitch.pullX = dx * inverse
+    hitch.pullY = dy * inverse
+    hitch.pullZ = dz * inverse
   }
 
   /** How far the tiller has gone towards the last lead since it was amidships, negative away, m. */
   function tillerGiven(delta: number): number {
-    const dx = line.lastX - line.tillerRadius * Math.cos(delta)
-    const dy = line.lastY + line.tillerRadius * Math.sin(delta)
+    const dx = line.lastX - line.tillerRadius * cos(delta)
+    const dy = line.lastY + line.tillerRadius * sin(delta)
     const dz = line.lastZ - line.tillerZ
     return line.leadToTillerAtRest - Math.sqrt(dx * dx + dy * dy + dz * dz)
   }
 
   function ratioAt(out: number): number {
-    const x = out * ex
-    const y = out * ey
-    const z = out * ez
-    return pullOverTension(ax - x, ay - y, az - z, bx - x, by - y, bz - z, ex, ey, ez)
+    const x = out * hitch.pullX
+    const y = out * hitch.pullY
+    const z = out * hitch.pullZ
+    return pullOverTension(
+      hitch.heldX - x,
+      hitch.heldY - y,
+      hitch.heldZ - z,
+      hitch.liveX - x,
+      hitch.liveY - y,
+      hitch.liveZ - z,
+      hitch.pullX,
+      hitch.pullY,
+      hitch.pullZ,
+    )
   }
 
   /** Solves out = slack - compliance T g(out) for the hitch; out of straight is never negative. */
   function solve(boom: number, delta: number, sheet: number, gain: number): number {
     place(boom)
-    const limit = 0.97 * hitchToLead
-    const asked = line.takeUp + hitchToLead - line.hitchToLeadAtRest - tillerGiven(delta)
+    const limit = 0.97 * hitch.toLead
+    const asked = line.takeUp + hitch.toLead - line.hitchToLeadAtRest - tillerGiven(delta)
     if (asked <= 0) return 0
     const free = Math.min(asked, limit)
     const compliance = sheet / (line.stiffness * gain)
@@ -98,7 +119,7 @@ export function createLineSolver(line: ControlLine): LineSolver {
   const solver: LineSolver = {
     hitchOut: 0,
     tension(boom, delta, sheet, friction) {
-      const gain = Math.exp(line.exponent * friction)
+      const gain = exp(line.exponent * friction)
       if (line.tail) {
         solver.hitchOut = 0
         return sheet / gain
@@ -112,13 +133,13 @@ export function createLineSolver(line: ControlLine): LineSolver {
         return (tillerGiven(delta) - line.takeUp + sheet / line.stiffness) / line.parts
       }
       const out = solve(boom, delta, sheet, 1)
-      const x = out * ex
-      const y = out * ey
-      const z = out * ez
-      const held = Math.sqrt((ax - x) ** 2 + (ay - y) ** 2 + (az - z) ** 2)
-      const live = Math.sqrt((bx - x) ** 2 + (by - y) ** 2 + (bz - z) ** 2)
+      const x = out * hitch.pullX
+      const y = out * hitch.pullY
+      const z = out * hitch.pullZ
+      const held = hypot(hitch.heldX - x, hitch.heldY - y, hitch.heldZ - z)
+      const live = hypot(hitch.liveX - x, hitch.liveY - y, hitch.liveZ - z)
       const straight =
-        Math.sqrt(ax * ax + ay * ay + az * az) + Math.sqrt(bx * bx + by * by + bz * bz)
+        hypot(hitch.heldX, hitch.heldY, hitch.heldZ) + hypot(hitch.liveX, hitch.liveY, hitch.liveZ)
       return -(held + live - straight - line.pathExtraAtRest) / line.parts
     },
   }

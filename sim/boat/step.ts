@@ -1,3 +1,4 @@
+import { hypot } from '../elementary'
 import type { Vessel } from './vessel'
 
 /** Longest step, s; a run at half of it differs by less than its tolerance (see docs/model.md, numerics). */
@@ -16,14 +17,16 @@ export function stepFor(vessel: Vessel, sheetTension: number): number {
   const { elastic } = line
   const cord = (3.5 * elastic.area * elastic.modulus) / elastic.naturalLength
   const part = Math.max(
-    Math.hypot(line.blockX - (line.luffX - line.reach), line.blockY, line.blockZ - line.boomZ),
+    hypot(line.blockX - (line.luffX - line.reach), line.blockY, line.blockZ - line.boomZ),
     0.1,
   )
   const share = line.hitchShare
   const bend = sheetTension / (part * Math.max(share * (1 - share), 0.01))
   const sheet = line.tail ? 0 : (bend * line.stiffness) / (bend + line.stiffness)
   const stiffness =
-    cord * elastic.tillerRadius ** 2 + sheet * line.tillerRadius ** 2 + rudder.friction / 0.02
+    cord * elastic.tillerRadius * elastic.tillerRadius +
+    sheet * line.tillerRadius * line.tillerRadius +
+    rudder.friction / 0.02
   const fastest = Math.max(Math.sqrt(stiffness / rudder.inertia), 22)
   let step = LONGEST
   while (step * fastest > STABLE && step > LONGEST / 64) step /= 2

@@ -1,4 +1,5 @@
 import { DEGREE, GRAVITY } from '../constants'
+import { sin } from '../elementary'
 import { liftSlope, turnDamping } from '../foils/section'
 import { addedMass } from '../hull/added-mass'
 import { HIGHEST_FROUDE, hullResistance } from '../hull/resistance'
@@ -116,8 +117,10 @@ export function vesselOf(plan: Plan): Vessel {
   const { hull, keel, rudder } = boat
   const tack = setup.conditions.trueWindAngleDeg < 0 ? -1 : 1
   const mass = hull.displacement
-  const rollOwn = mass * (hull.rollRadiusRatio * hull.beamOverall) ** 2
-  const yawOwn = mass * (hull.yawRadiusRatio * hull.lengthOverall) ** 2
+  const rollRadius = hull.rollRadiusRatio * hull.beamOverall
+  const rollOwn = mass * rollRadius * rollRadius
+  const yawRadius = hull.yawRadiusRatio * hull.lengthOverall
+  const yawOwn = mass * yawRadius * yawRadius
   const added = addedMass(hull.waterlineLength, hull.canoeBodyDraught, mass, rollOwn)
   const rollInertia = rollOwn + added.roll
   const keelDepth = hull.canoeBodyDraught + keel.span
@@ -126,7 +129,9 @@ export function vesselOf(plan: Plan): Vessel {
   const keelAspect = (2 * keelDepth * keelDepth) / keelArea
   const keelSlope = liftSlope(keelAspect, keel.sweepDeg * DEGREE)
   const rudderAspect = (2 * rudder.span * rudder.span) / rudder.area
-  const sails = Object.entries(boat.sails).flatMap(([id]) => vesselSail(plan, id, tack) ?? [])
+  // In a fixed order, so that sums come out the same to the last bit however the document was stored.
+  const ids = Object.keys(boat.sails).sort()
+  const sails = ids.flatMap((id) => vesselSail(plan, id, tack) ?? [])
   const source = sails.findIndex((sail) => sail.id === setup.source)
   return {
     tack,
@@ -211,7 +216,7 @@ function vesselSail(plan: Plan, id: string, tack: 1 | -1): VesselSail | undefine
     sail.sheetZ,
   )
   const soft = sail.kind === 'headsail'
-  const across = Math.max(geometric, soft ? Math.sin(clothAngle(sail.camber)) : LEAST_ACROSS)
+  const across = Math.max(geometric, soft ? sin(clothAngle(sail.camber)) : LEAST_ACROSS)
   const rake = soft ? FORESTAY_RAKE * (height - sail.footZ) : 0
   return {
     id,

@@ -1,3 +1,4 @@
+import { cos, exp, sin } from '../elementary'
 import type { Seaway } from '../sea/seaway'
 import type { Vessel } from './vessel'
 
@@ -41,10 +42,10 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
     const ki = k[i] as number
     const wi = omega[i] as number
     const ai = sea.amplitude[i] as number
-    velocity[i] = ai * wi * Math.exp(-ki * vessel.keel.depth)
-    rudderVelocity[i] = ai * wi * Math.exp(-ki * vessel.rudder.depth)
-    acceleration[i] = ai * wi * wi * Math.exp((-ki * vessel.draught) / 2)
-    slope[i] = ai * ki * Math.exp((-ki * vessel.draught) / 2)
+    velocity[i] = ai * wi * exp(-ki * vessel.keel.depth)
+    rudderVelocity[i] = ai * wi * exp(-ki * vessel.rudder.depth)
+    acceleration[i] = ai * wi * wi * exp((-ki * vessel.draught) / 2)
+    slope[i] = ai * ki * exp((-ki * vessel.draught) / 2)
   }
   const lateralMass = vessel.swayMass
   const table = hullTable(vessel.rudder.x / halfLength)
@@ -118,7 +119,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
 const SINE_ROWS = 4096
 const TURNS_PER_RADIAN = 1 / (2 * Math.PI)
 const SINE = Float64Array.from({ length: (5 * SINE_ROWS) / 4 + 2 }, (_, i) =>
-  Math.sin((2 * Math.PI * i) / SINE_ROWS),
+  sin((2 * Math.PI * i) / SINE_ROWS),
 )
 
 /** Largest q kept: beyond it the hull spans many waves and feels next to nothing of them. */
@@ -146,8 +147,8 @@ function hullTable(rudderShare: number): HullTable {
     const q = i / ROWS_PER_Q
     table.even[i] = hullEven(q)
     table.odd[i] = hullOdd(q)
-    table.cosShift[i] = Math.cos(rudderShare * q)
-    table.sinShift[i] = Math.sin(rudderShare * q)
+    table.cosShift[i] = cos(rudderShare * q)
+    table.sinShift[i] = sin(rudderShare * q)
   }
   return table
 }
@@ -155,14 +156,14 @@ function hullTable(rudderShare: number): HullTable {
 /** E(q) = 3 (sin q - q cos q)/q^3, by its series near zero. */
 export function hullEven(q: number): number {
   if (q < 0.2) return 1 - (q * q) / 10 + (q * q * q * q) / 280
-  return (3 * (Math.sin(q) - q * Math.cos(q))) / (q * q * q)
+  return (3 * (sin(q) - q * cos(q))) / (q * q * q)
 }
 
 /** O(q) = -dE/dq, by its series near zero. */
 export function hullOdd(q: number): number {
   if (q < 0.2) return q / 5 - (q * q * q) / 70
-  const bow = Math.sin(q) - q * Math.cos(q)
-  return (3 * (3 * bow - q * q * Math.sin(q))) / (q * q * q * q)
+  const bow = sin(q) - q * cos(q)
+  return (3 * (3 * bow - q * q * sin(q))) / (q * q * q * q)
 }
 
 function between(column: Float64Array, row: number, share: number): number {

@@ -1,4 +1,5 @@
 import { RHO_SEA } from '../constants'
+import { cos, sin } from '../elementary'
 import { smoothStep } from '../numbers'
 
 /**
@@ -10,8 +11,8 @@ import { smoothStep } from '../numbers'
  * @source Whicker & Fehlner 1958, DTMB report 933
  */
 export function liftSlope(aspect: number, sweep = 0): number {
-  const c = Math.cos(sweep)
-  return (1.8 * Math.PI * aspect) / (1.8 + c * Math.sqrt((aspect * aspect) / c ** 4 + 4))
+  const c = cos(sweep)
+  return (1.8 * Math.PI * aspect) / (1.8 + c * Math.sqrt((aspect * aspect) / (c * c * c * c) + 4))
 }
 
 /** Lift slope of a wing by Helmbold, per rad: 2 pi a / (2 + sqrt(a^2 + 4)). Used for sails. */
@@ -30,7 +31,7 @@ export function helmboldSlope(aspect: number): number {
  * @source thin-aerofoil theory with pitch rate; Katz & Plotkin, Low-Speed Aerodynamics, section 5.6, from memory
  */
 export function turnDamping(slope: number, chord: number, span: number): number {
-  return (Math.PI / 16) * RHO_SEA * chord ** 3 * span * (slope / (2 * Math.PI))
+  return (Math.PI / 16) * RHO_SEA * chord * chord * chord * span * (slope / (2 * Math.PI))
 }
 
 /** Section drag at zero lift; Whicker & Fehlner 1958. */
@@ -62,8 +63,8 @@ function stalledNormal(sine: number): number {
  * @param slope per rad
  */
 export function foilLift(incidence: number, slope: number): number {
-  const s = Math.sin(incidence)
-  const c = Math.cos(incidence)
+  const s = sin(incidence)
+  const c = cos(incidence)
   const stalled = stalledShare(incidence)
   return c * ((1 - stalled) * slope * s + stalled * stalledNormal(s))
 }
@@ -76,7 +77,7 @@ export function foilLift(incidence: number, slope: number): number {
  * @param aspect effective aspect ratio
  */
 export function foilDrag(incidence: number, lift: number, aspect: number): number {
-  const s = Math.sin(incidence)
+  const s = sin(incidence)
   const stalled = stalledShare(incidence)
   const induced = (lift * lift) / (SPAN_EFFICIENCY * Math.PI * aspect)
   return FOIL_DRAG + (1 - stalled) * induced + stalled * s * stalledNormal(s)
@@ -84,5 +85,6 @@ export function foilDrag(incidence: number, lift: number, aspect: number): numbe
 
 /** Centre of pressure behind the leading edge over the chord: .22 attached (Whicker & Fehlner), to mid-chord when stalled. */
 export function foilCentre(incidence: number): number {
-  return 0.22 + 0.22 * stalledShare(incidence) + 0.06 * Math.sin(incidence) ** 2
+  const s = sin(incidence)
+  return 0.22 + 0.22 * stalledShare(incidence) + 0.06 * s * s
 }

@@ -1,8 +1,9 @@
 import { GRAVITY, NU_SEA, RHO_SEA } from '../constants'
+import { log } from '../elementary'
 
 /** ITTC-57 friction line CF = .075/(log10 Re - 2)^2, with Re not below 1e5; Tupper, Introduction to Naval Architecture. */
 export function frictionCoefficient(reynolds: number): number {
-  const decades = Math.log10(Math.max(reynolds, 1e5)) - 2
+  const decades = log(Math.max(reynolds, 1e5)) / Math.LN10 - 2
   return 0.075 / (decades * decades)
 }
 

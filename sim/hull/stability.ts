@@ -1,3 +1,5 @@
+import { sin } from '../elementary'
+
 /**
  * Righting arm, m: (GM phi_v/pi) sin(pi phi/phi_v). Slope GM upright, zero at the vanishing angle phi_v,
  * highest half way there.
@@ -8,5 +10,5 @@
  * @source shape fitted to published cruising-yacht curves (largest near 65 degrees, vanishing near 130)
  */
 export function rightingArm(heel: number, metacentricHeight: number, vanishing: number): number {
-  return ((metacentricHeight * vanishing) / Math.PI) * Math.sin((Math.PI * heel) / vanishing)
+  return ((metacentricHeight * vanishing) / Math.PI) * sin((Math.PI * heel) / vanishing)
 }

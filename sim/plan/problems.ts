@@ -1,4 +1,5 @@
 /** Refusals of a plan before a run starts: every value in its range, and what only several values together tell. */
+import { cos, hypot, sin } from '../elementary'
 import { checkValue, keysOf, parameterAt, readValue } from './keys'
 import type { Plan } from './types'
 
@@ -95,8 +96,8 @@ function lineProblems(plan: Plan): Problem[] {
   const windward = trim.held === 'pole' || trim.held === 'backed' ? 1 : -1
   const block = { x: source.sheetX, y: windward * source.sheetY, z: source.sheetZ }
   const boom = {
-    x: source.luffX - source.sheetReach * Math.cos(angle),
-    y: windward * source.sheetReach * Math.sin(angle),
+    x: source.luffX - source.sheetReach * cos(angle),
+    y: windward * source.sheetReach * sin(angle),
     z: source.footZ,
   }
   const part = distance(block, boom)
@@ -163,7 +164,7 @@ function between(a: Point, b: Point, share: number): Point {
 }
 
 function distance(a: Point, b: Point): number {
-  return Math.hypot(a.x - b.x, a.y - b.y, a.z - b.z)
+  return hypot(a.x - b.x, a.y - b.y, a.z - b.z)
 }
 
 function round(value: number): number {

@@ -1,4 +1,5 @@
 import { DEGREE } from '../constants'
+import { cos, sin } from '../elementary'
 import { helmboldSlope } from '../foils/section'
 import { smoothStep } from '../numbers'
 
@@ -72,7 +73,7 @@ export function sailLift(incidence: number, boomAngle: number, curve: SailCurve)
   if (full === 0) return 0
   const stalled = smoothStep(STALL_BEGINS, STALL_ENDS, a)
   const attached = stalled < 1 ? curve.slope * (a + curve.zeroLift) * twistLoss(boomAngle) : 0
-  const lift = (1 - stalled) * attached + stalled * stalledNormal(a) * Math.cos(a)
+  const lift = (1 - stalled) * attached + stalled * stalledNormal(a) * cos(a)
   return incidence < 0 ? -full * lift : full * lift
 }
 
@@ -86,7 +87,7 @@ export function sailDrag(incidence: number, lift: number, curve: SailCurve): num
   const full = fullness(a)
   const stalled = smoothStep(STALL_BEGINS, STALL_ENDS, a)
   const induced = (lift * lift) / (Math.PI * curve.aspect)
-  const separated = stalledNormal(a) * Math.sin(a)
+  const separated = stalledNormal(a) * sin(a)
   return (
     SKIN_DRAG + FLOGGING_DRAG * (1 - full) + (1 - stalled) * induced + full * stalled * separated
   )
@@ -99,6 +100,6 @@ export function sailDrag(incidence: number, lift: number, curve: SailCurve): num
  * @source thin circular arc f = .10: .3835 at 10 degrees; inclined plates: .5 at 90 (Rayleigh, Joessel)
  */
 export function sailCentre(incidence: number): number {
-  const s = Math.sin(Math.abs(incidence))
+  const s = sin(Math.abs(incidence))
   return Math.abs(incidence) <= Math.PI / 2 ? 0.38 + 0.12 * s : 0.62 - 0.12 * s
 }

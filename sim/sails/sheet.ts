@@ -1,3 +1,5 @@
+import { atan2, cos, hypot, sin } from '../elementary'
+
 /**
  * Length a sheet gives or takes for a change of boom angle, per part, over the reach a:
  * |d length / d beta| / a, from its real direction in three dimensions. A part that leads down or along
@@ -19,8 +21,8 @@ export function sheetAcross(
   leadY: number,
   leadZ: number,
 ): number {
-  const s = Math.sin(beta)
-  const c = Math.cos(beta)
+  const s = sin(beta)
+  const c = cos(beta)
   const dx = leadX - (luffX - reach * c)
   const dy = leadY - reach * s
   const dz = leadZ - height
@@ -41,7 +43,7 @@ export const HEADSAIL_SHEET_SHARE = 0.65
  * the cloth, so it is never closer to the chord than this.
  */
 export function clothAngle(camber: number): number {
-  return Math.atan(4 * camber)
+  return atan2(4 * camber, 1)
 }
 
 /**
@@ -70,6 +72,6 @@ export function mainsheetBound(luff: number, foot: number, fromEnd: number, wind
   const P = luff * ft
   const E = foot * ft
   const kn = wind / 0.514444444
-  const pounds = (E * E * P * P * 0.00431 * kn * kn) / (Math.hypot(P, E) * (E - fromEnd * ft))
+  const pounds = (E * E * P * P * 0.00431 * kn * kn) / (hypot(P, E) * (E - fromEnd * ft))
   return pounds * 4.4482216
 }

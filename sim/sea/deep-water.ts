@@ -1,4 +1,5 @@
 import { GRAVITY } from '../constants'
+import { cos } from '../elementary'
 
 /** Deep-water dispersion k = omega^2/g, rad/m; Airy theory. */
 export function waveNumber(omega: number): number {
@@ -23,5 +24,5 @@ export function phaseSpeed(period: number): number {
  * @param waveHeading mu, rad, 0 in a following sea
  */
 export function encounterFrequency(omega: number, speed: number, waveHeading: number): number {
-  return Math.abs(omega - waveNumber(omega) * speed * Math.cos(waveHeading))
+  return Math.abs(omega - waveNumber(omega) * speed * cos(waveHeading))
 }

@@ -1,3 +1,4 @@
+import { cos, power, sin } from '../elementary'
 import { uniformFrom } from '../random'
 import { waveNumber } from './deep-water'
 import { bretschneider } from './spectrum'
@@ -53,10 +54,10 @@ export function seaway(
     phase: new Float64Array(count),
   }
   const peak = (2 * Math.PI) / peakPeriod
-  const ratio = (HIGHEST / LOWEST) ** (1 / Math.max(count, 1))
+  const ratio = power(HIGHEST / LOWEST, 1 / Math.max(count, 1))
   let variance = 0
   for (let i = 0; i < count; i++) {
-    const low = peak * LOWEST * ratio ** i
+    const low = peak * LOWEST * power(ratio, i)
     const width = low * (ratio - 1)
     const omega = low + width * uniform()
     const energy = bretschneider(omega, height, peakPeriod) * width
@@ -65,8 +66,8 @@ export function seaway(
     sea.omega[i] = omega
     sea.k[i] = waveNumber(omega)
     sea.amplitude[i] = Math.sqrt(2 * energy)
-    sea.cosDirection[i] = Math.cos(toward)
-    sea.sinDirection[i] = Math.sin(toward)
+    sea.cosDirection[i] = cos(toward)
+    sea.sinDirection[i] = sin(toward)
     sea.phase[i] = 2 * Math.PI * uniform()
     variance += energy
   }
@@ -79,8 +80,8 @@ export function seaway(
 function inverseCosineSquared(share: number): number {
   let angle = (share - 0.5) * 2
   for (let i = 0; i < 12; i++) {
-    const below = 0.5 + (angle + Math.sin(angle) * Math.cos(angle)) / Math.PI
-    const density = (2 / Math.PI) * Math.max(Math.cos(angle) ** 2, 0.02)
+    const below = 0.5 + (angle + sin(angle) * cos(angle)) / Math.PI
+    const density = (2 / Math.PI) * Math.max(cos(angle) * cos(angle), 0.02)
     angle -= (below - share) / density
     if (angle > 1.55) angle = 1.55
     if (angle < -1.55) angle = -1.55

@@ -1,3 +1,5 @@
+import { exp } from '../elementary'
+
 /**
  * Bretschneider (two-parameter Pierson-Moskowitz) spectrum, m^2 s; its integral is Hs^2/16.
  *
@@ -8,6 +10,7 @@
  */
 export function bretschneider(omega: number, height: number, peakPeriod: number): number {
   const peak = (2 * Math.PI) / peakPeriod
-  const ratio = (peak / omega) ** 4
-  return ((5 / 16) * height * height * ratio * Math.exp(-1.25 * ratio)) / omega
+  const over = peak / omega
+  const ratio = over * over * over * over
+  return ((5 / 16) * height * height * ratio * exp(-1.25 * ratio)) / omega
 }

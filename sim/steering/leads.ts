@@ -1,3 +1,5 @@
+import { exp, log, sin } from '../elementary'
+
 /** Unit tension T over leads: what each takes from it, as a friction exponent ln(T_in/T_out). */
 
 /** Loss at a half turn of a sheave; Toss, The Complete Rigger's Apprentice: 2 % on balls, 3 to 10 % on plain bearings. */
@@ -9,12 +11,12 @@ export type LeadKind = keyof typeof SHEAVE_LOSS | keyof typeof RUBBING
 
 /** Capstan ratio of tensions e^(mu theta); Eytelwein. */
 export function capstan(friction: number, turning: number): number {
-  return Math.exp(friction * turning)
+  return exp(friction * turning)
 }
 
 /** Load on a block over the line's tension: 2 sin(theta/2). */
 export function blockLoad(turning: number): number {
-  return 2 * Math.sin(turning / 2)
+  return 2 * sin(turning / 2)
 }
 
 /**
@@ -25,7 +27,7 @@ export function blockLoad(turning: number): number {
  */
 export function leadExponent(kind: LeadKind, turning: number): number {
   if (kind === 'ball' || kind === 'plain') {
-    return -Math.log(1 - (SHEAVE_LOSS[kind] * blockLoad(turning)) / 2)
+    return -log(1 - (SHEAVE_LOSS[kind] * blockLoad(turning)) / 2)
   }
   return RUBBING[kind] * turning
 }

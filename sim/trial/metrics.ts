@@ -1,4 +1,5 @@
 import { DEGREE } from '../constants'
+import { atan2, cos, sin } from '../elementary'
 import { wrapAngle } from '../numbers'
 import { judgingParameters } from '../parameters/judging'
 import type { Metrics } from './types'
@@ -25,11 +26,11 @@ export function metricsOf(
   let c = 0
   let s = 0
   for (const mean of means) {
-    c += Math.cos(mean)
-    s += Math.sin(mean)
+    c += cos(mean)
+    s += sin(mean)
   }
   const judged = means.length > 0
-  const average = judged ? Math.atan2(s, c) : askedSide
+  const average = judged ? atan2(s, c) : askedSide
   let inside = 0
   let squares = 0
   let most = 0

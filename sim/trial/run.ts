@@ -16,6 +16,7 @@ import { stepFor } from '../boat/step'
 import { createSystem, type System } from '../boat/system'
 import { type Vessel, vesselOf } from '../boat/vessel'
 import { DEGREE, KNOT } from '../constants'
+import { atan2, hypot } from '../elementary'
 import { adaptive } from '../integrate/adaptive'
 import { rungeKutta } from '../integrate/runge-kutta'
 import { wrapAngle } from '../numbers'
@@ -184,8 +185,8 @@ function writeRow(
   series.courseToWindDeg[row] = courseToWind / DEGREE
   series.headingDeg[row] = wrapAngle(y[HEADING] as number) / DEGREE
   series.heelDeg[row] = (y[HEEL] as number) / DEGREE
-  series.speedKn[row] = Math.hypot(u, v) / KNOT
-  series.leewayDeg[row] = Math.atan2(v, u) / DEGREE
+  series.speedKn[row] = hypot(u, v) / KNOT
+  series.leewayDeg[row] = atan2(v, u) / DEGREE
   series.rollRateDegS[row] = (y[ROLL_RATE] as number) / DEGREE
   series.yawRateDegS[row] = (y[YAW_RATE] as number) / DEGREE
   series.tillerDeg[row] = -(y[RUDDER] as number) / DEGREE
@@ -194,8 +195,8 @@ function writeRow(
   series.sheetN[row] = seen.sheetTension
   series.northM[row] = y[NORTH] as number
   series.eastM[row] = y[EAST] as number
-  series.windDirectionDeg[row] = Math.atan2(-seen.windEast, -seen.windNorth) / DEGREE
-  series.windSpeedKn[row] = Math.hypot(seen.windNorth, seen.windEast) / KNOT
+  series.windDirectionDeg[row] = atan2(-seen.windEast, -seen.windNorth) / DEGREE
+  series.windSpeedKn[row] = hypot(seen.windNorth, seen.windEast) / KNOT
   series.apparentWindAngleDeg[row] = seen.apparentAngle / DEGREE
   series.apparentWindSpeedKn[row] = seen.apparentSpeed / KNOT
   series.hitchOutM[row] = seen.hitchOut

@@ -1,5 +1,6 @@
 import type { Balance } from '../analysis/balance'
 import { DEGREE } from '../constants'
+import { atan2, cos, sin } from '../elementary'
 import { wrapAngle } from '../numbers'
 import type { Helm } from '../plan/types'
 import type { Happening, Metrics, Verdict, VerdictCode } from './types'
@@ -37,10 +38,10 @@ function lastCourse(means: number[]): number {
   let c = 0
   let s = 0
   for (const mean of tail) {
-    c += Math.cos(mean)
-    s += Math.sin(mean)
+    c += cos(mean)
+    s += sin(mean)
   }
-  return Math.atan2(s, c) / DEGREE
+  return atan2(s, c) / DEGREE
 }
 
 /** A sailor's sentence on how the run went, and why. */

@@ -4,6 +4,7 @@ import { BOOM, HEADING, HEEL, RUDDER, SURGE, SWAY } from '../boat/state'
 import type { Observation } from '../boat/system'
 import type { Vessel } from '../boat/vessel'
 import { DEGREE, KNOT } from '../constants'
+import { atan2, cos, hypot, sin } from '../elementary'
 import { wrapAngle } from '../numbers'
 import { judgingParameters } from '../parameters/judging'
 import type { Happening } from './types'
@@ -122,12 +123,12 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       const heel = y[HEEL] as number
       windNorth.push(observed.windNorth)
       windEast.push(observed.windEast)
-      const windFrom = Math.atan2(-windEast.sum, -windNorth.sum)
+      const windFrom = atan2(-windEast.sum, -windNorth.sum)
       const course = wrapAngle(windFrom - heading)
       watch.courseToWind = course
-      courseCos.push(Math.cos(course))
-      courseSin.push(Math.sin(course))
-      const speed = Math.hypot(y[SURGE] as number, y[SWAY] as number)
+      courseCos.push(cos(course))
+      courseSin.push(sin(course))
+      const speed = hypot(y[SURGE] as number, y[SWAY] as number)
       if (!(Math.abs(heel) < CAPSIZED) || !Number.isFinite(speed)) {
         watch.lost = true
         watch.outOfRange = true
@@ -192,7 +193,7 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       watch.lineSum += observed.lineTension
       watch.elasticSum += observed.elasticTension
       if (t >= judge.unjudged) {
-        watch.means.push(vessel.tack * Math.atan2(courseSin.sum, courseCos.sum))
+        watch.means.push(vessel.tack * atan2(courseSin.sum, courseCos.sum))
       }
     },
   }

@@ -1,3 +1,5 @@
+import { atan2, cos, hypot, sin } from '../elementary'
+
 export interface ApparentWind {
   /** Same unit as the speeds given. */
   speed: number
@@ -20,7 +22,7 @@ export function apparentWind(
   boatSpeed: number,
   heel = 0,
 ): ApparentWind {
-  const ahead = trueSpeed * Math.cos(trueAngle) + boatSpeed
-  const across = trueSpeed * Math.sin(trueAngle) * Math.cos(heel)
-  return { speed: Math.hypot(ahead, across), angle: Math.atan2(across, ahead) }
+  const ahead = trueSpeed * cos(trueAngle) + boatSpeed
+  const across = trueSpeed * sin(trueAngle) * cos(heel)
+  return { speed: hypot(ahead, across), angle: atan2(across, ahead) }
 }

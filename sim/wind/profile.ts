@@ -1,3 +1,5 @@
+import { log } from '../elementary'
+
 /**
  * Mean wind over the sea at height z over that at 10 m: U(z)/U0 = 1 + C ln(z/10),
  * C = .0573 sqrt(1 + .15 U0).
@@ -8,5 +10,5 @@
  */
 export function windProfile(z: number, windAt10: number): number {
   const slope = 0.0573 * Math.sqrt(1 + 0.15 * windAt10)
-  return 1 + slope * Math.log(Math.max(z, 0.5) / 10)
+  return 1 + slope * log(Math.max(z, 0.5) / 10)
 }

@@ -1,3 +1,4 @@
+import { cos, power, sin } from '../elementary'
 import { uniformFrom } from '../random'
 
 /** Ratio of the lateral to the longitudinal standard deviation; IEC 61400-1 ed. 3, table B.1 (from memory). */
@@ -28,7 +29,7 @@ export function turbulenceScale(z: number): number {
  */
 export function kaimal(frequency: number, speed: number, sigma: number, scale: number): number {
   const time = scale / speed
-  return (4 * sigma * sigma * time) / (1 + 6 * frequency * time) ** (5 / 3)
+  return (4 * sigma * sigma * time) / power(1 + 6 * frequency * time, 5 / 3)
 }
 
 export interface Turbulence {
@@ -73,12 +74,12 @@ function component(
   scale: number,
 ): Float64Array {
   const record = new Float64Array(samples)
-  const ratio = (HIGHEST_FREQUENCY / LOWEST_FREQUENCY) ** (1 / COMPONENTS)
+  const ratio = power(HIGHEST_FREQUENCY / LOWEST_FREQUENCY, 1 / COMPONENTS)
   const amplitudes = new Float64Array(COMPONENTS)
   const frequencies = new Float64Array(COMPONENTS)
   let variance = 0
   for (let i = 0; i < COMPONENTS; i++) {
-    const low = LOWEST_FREQUENCY * ratio ** i
+    const low = LOWEST_FREQUENCY * power(ratio, i)
     const width = low * (ratio - 1)
     // One frequency drawn inside each band keeps the record from repeating.
     const frequency = low + width * uniform()
@@ -92,10 +93,10 @@ function component(
     const amplitude = gain * (amplitudes[i] as number)
     const turn = 2 * Math.PI * (frequencies[i] as number) * TURBULENCE_STEP
     const phase = 2 * Math.PI * uniform()
-    const cosTurn = Math.cos(turn)
-    const sinTurn = Math.sin(turn)
-    let re = amplitude * Math.cos(phase)
-    let im = amplitude * Math.sin(phase)
+    const cosTurn = cos(turn)
+    const sinTurn = sin(turn)
+    let re = amplitude * cos(phase)
+    let im = amplitude * sin(phase)
     for (let n = 0; n < samples; n++) {
       record[n] = (record[n] as number) + re
       const next = re * cosTurn - im * sinTurn
