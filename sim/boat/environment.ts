@@ -43,7 +43,7 @@ export function environmentOf(
       conditions.seed ^ SEA_STREAM,
       calm ? 0 : 1,
       conditions.peakWavePeriodS,
-      Math.PI + conditions.waveAngleDeg * DEGREE,
+      conditions.waveAngleDeg * DEGREE,
       mirror,
     ),
     significantHeight: conditions.significantWaveHeightM,

@@ -19,19 +19,19 @@ export interface Seaway {
 }
 
 const COMPONENTS = 20
-/** Band of the spectrum kept, over the peak frequency: 99 % of a Bretschneider sea's energy up to 3. */
+/** Band of the spectrum kept, over the peak frequency: 98.5 % of a Bretschneider sea's energy lie in it. */
 const LOWEST = 0.6
 const HIGHEST = 3
 
 /**
  * A seaway with Bretschneider energy and cos^2 spreading about its mean direction.
- * Bands of equal energy share, one frequency and one direction drawn in each, so that the record
- * does not repeat and its variance is Hs^2/16 whatever the seed.
+ * Bands of equal width on a logarithmic scale, one frequency and one direction drawn in each, so that
+ * the record does not repeat; scaled so that its variance is Hs^2/16 whatever the seed.
  *
  * @param seed whole number
  * @param height significant wave height, m
  * @param peakPeriod s
- * @param direction direction the sea runs to, rad clockwise from north
+ * @param from direction the sea comes from, rad clockwise from north
  * @param mirror +1, or -1 for the mirror image about north
  * @source spreading: cos^2, ITTC recommended procedure 7.5-02-07-01.1, from memory
  */
@@ -39,7 +39,7 @@ export function seaway(
   seed: number,
   height: number,
   peakPeriod: number,
-  direction: number,
+  from: number,
   mirror: 1 | -1 = 1,
 ): Seaway {
   const uniform = uniformFrom(seed)
@@ -62,12 +62,12 @@ export function seaway(
     const omega = low + width * uniform()
     const energy = bretschneider(omega, height, peakPeriod) * width
     const spread = inverseCosineSquared(uniform())
-    const toward = direction + mirror * spread
+    const away = from + mirror * spread
     sea.omega[i] = omega
     sea.k[i] = waveNumber(omega)
     sea.amplitude[i] = Math.sqrt(2 * energy)
-    sea.cosDirection[i] = cos(toward)
-    sea.sinDirection[i] = sin(toward)
+    sea.cosDirection[i] = -cos(away)
+    sea.sinDirection[i] = -sin(away)
     sea.phase[i] = 2 * Math.PI * uniform()
     variance += energy
   }
