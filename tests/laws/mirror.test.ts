@@ -72,7 +72,7 @@ const conditions = fc.record({
 })
 
 describe('port and starboard tack are mirror images', () => {
-  test('over the first minute, for any boat, trim, helm, wind, sea and shift', () => {
+  test('to the last bit over the first minute, for any boat, trim, helm, wind, sea and shift', () => {
     fc.assert(
       fc.property(
         fc.constantFrom(...demoPlans.map((plan) => plan.setup.id)),
@@ -101,13 +101,13 @@ describe('port and starboard tack are mirror images', () => {
           ]
           const starboard = sail(trimmed, wind, events, helm, 1)
           const port = sail(trimmed, wind, events, helm, -1)
-          expect(difference(starboard, port)).toBeLessThan(1e-7)
+          expect(difference(starboard, port)).toBe(0)
           expect(port.happenings).toEqual(
             starboard.happenings.map((told) => ({ ...told, text: expect.any(String) })),
           )
         },
       ),
-      { numRuns: 60, seed: 20 },
+      { numRuns: 50, seed: 20 },
     )
   })
 
@@ -116,7 +116,7 @@ describe('port and starboard tack are mirror images', () => {
     for (const helm of ['sheet-to-tiller', 'lashed', 'free'] as const) {
       const starboard = sail(plan, setup.conditions, [], helm, 1)
       const port = sail(plan, setup.conditions, [], helm, -1)
-      expect(difference(starboard, port)).toBeLessThan(1e-7)
+      expect(difference(starboard, port)).toBe(0)
       expect(port.metrics.meanCourseToWindDeg).toBeCloseTo(
         -starboard.metrics.meanCourseToWindDeg,
         6,

@@ -212,7 +212,7 @@ describe('a seaway', () => {
     for (let seed = 1; seed <= 200; seed++) {
       const { sinDirection, cosDirection } = seaway(seed, 1, 5, 0)
       sinDirection.forEach((s, i) => {
-        const angle = Math.atan2(s, cosDirection[i] as number)
+        const angle = Math.atan2(-s, -(cosDirection[i] as number))
         expect(Math.abs(angle)).toBeLessThanOrEqual(Math.PI / 2)
         sine += s
         squares += angle * angle
