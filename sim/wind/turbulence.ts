@@ -74,6 +74,8 @@ function component(
   scale: number,
 ): Float64Array {
   const record = new Float64Array(samples)
+  // Also without any wind, where the spectrum is not defined.
+  if (sigma === 0) return record
   const ratio = power(HIGHEST_FREQUENCY / LOWEST_FREQUENCY, 1 / COMPONENTS)
   const amplitudes = new Float64Array(COMPONENTS)
   const frequencies = new Float64Array(COMPONENTS)
