@@ -1,5 +1,5 @@
 import { judgingParameters } from 'sim/parameters/judging'
-import { clamp, tackOf } from './frame'
+import { clamp, tackOf, wrapDegrees } from './frame'
 import { momentAt } from './moment'
 import { courseOnTack } from './strip-scales'
 import type { Measure, Measures, Reading, Run } from './types'
@@ -73,7 +73,7 @@ function courseReading(run: Run, cursorS: number, { angle }: Measures): Reading 
   return {
     plot: 'course',
     title: 'Course to the wind',
-    atCursor: `${figure(angle, Math.abs(course))} to the wind, ${side}, ${where}.`,
+    atCursor: `${figure(angle, Math.abs(wrapDegrees(course)))} to the wind, ${side}, ${where}.`,
     overRun: `${courseRange(angle, all)}; ${percent(within)} of the judged time within ${figure(angle, band.halfWidthDeg)} of the ${figure(angle, centre)} asked.`,
   }
 }

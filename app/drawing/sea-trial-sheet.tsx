@@ -16,12 +16,20 @@ import { ScaleBar } from './scale-bar'
 import { RudderBlade, Tiller } from './tiller-drawing'
 import type { Anchor, Moment, Run, SeaTrialSheetProps, Size } from './types'
 import { Wake, Waves, windSwingDeg } from './water'
-import { BandSector, CoursePointer, GhostPointer, RingFigures, RingGraduation } from './wind-ring'
+import {
+  BandSector,
+  CoursePointer,
+  GhostPointer,
+  namedCourses,
+  RingFigures,
+  RingGraduation,
+} from './wind-ring'
 
-/** Room over the ring for the true wind. */
+/** Room over the ring for the true wind, and under it for the figure of a dead run. */
 function topRoom({ width, height }: Size): number {
-  return width < 600 || height < 560 ? 66 : 88
+  return width < 600 || height < 560 ? 62 : 88
 }
+const footRoom = 36
 
 /** Pixels of arrow per knot, the same for true and apparent wind. */
 function arrowScale(run: Run): number {
@@ -34,16 +42,20 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
   const { plan } = run.request
   const { hull } = plan.boat
   const top = topRoom({ width, height })
-  const radius = Math.round(Math.min(width / 2 - (width < 600 ? 58 : 76), (height - top - 40) / 2))
+  const narrow = width < 600
+  const radius = Math.round(Math.min(width / 2 - (narrow ? 58 : 76), (height - top - footRoom) / 2))
   const centre = { x: Math.round(width / 2), y: top + radius }
   const ring = { centre, radius }
-  const scale = (1.42 * radius) / hull.lengthOverall
+  const scale = (1.5 * radius) / hull.lengthOverall
   const midships = hull.bowX - hull.lengthOverall / 2
   const turn = -moment.courseToWindDeg
   const onSheet = (point: Anchor): Anchor => turned(point, turn, centre, midships * scale)
   const gravityAt = onSheet(onPaper({ x: hull.centreOfGravityX, y: 0 }, scale))
 
   const shapes = sailShapes(plan, moment)
+  const ghostCourses = ghosts.map(({ run: other }) => momentAt(other, moment.timeS).courseToWindDeg)
+  const named = namedCourses(ring, moment.courseToWindDeg, ghostCourses)
+  const written = [moment.courseToWindDeg, ...ghostCourses.filter((_, place) => named[place])]
 
   return (
     <svg
@@ -62,7 +74,7 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
       />
       <BandSector ring={ring} band={run.result.band} />
       <RingGraduation centre={centre} radius={radius} />
-      <RingFigures ring={ring} courseDeg={moment.courseToWindDeg} format={measures.angle.format} />
+      <RingFigures ring={ring} written={written} format={measures.angle.format} />
       <Wake
         run={run}
         moment={moment}
@@ -74,11 +86,9 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
         <GhostPointer
           key={ghost.helm}
           ring={ring}
-          courseDeg={momentAt(ghost.run, moment.timeS).courseToWindDeg}
-          label={ghost.label}
+          courseDeg={ghostCourses[place] ?? 0}
+          label={named[place] ? ghost.label : null}
           dash={ghostDash[ghost.helm]}
-          place={place}
-          besideDeg={moment.courseToWindDeg}
         />
       ))}
       <CoursePointer
@@ -86,6 +96,7 @@ export function SeaTrialSheet(props: SeaTrialSheetProps) {
         courseDeg={moment.courseToWindDeg}
         text={`${measures.angle.format(Math.abs(moment.courseToWindDeg))}°`}
         from={(hull.lengthOverall / 2) * scale + 6}
+        small={narrow}
       />
       <g
         transform={`translate(${centre.x} ${centre.y}) rotate(${tenth(turn)}) translate(0 ${tenth(midships * scale)})`}
@@ -127,6 +138,9 @@ function sailShapes(plan: Plan, moment: Moment): Shapes {
     })
 }
 
+/** One line for all its parts: the detail shows them, and several side by side look like a spar. */
+const sheetInk = { parts: 1, gap: 0, thin: 0.8, thick: 1.8 } as const
+
 /** Everything rigged that moves, from the deck upwards. */
 function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) {
   const { run, moment, scale, shapes } = props
@@ -150,10 +164,9 @@ function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) 
             key={id}
             deck={paper(deck)}
             boom={paper(boom)}
-            parts={sail.sheetParts}
             tensionN={90}
             slack={(moment.drawing[id] ?? 0) < 0.05}
-            gap={2}
+            {...sheetInk}
           />
         )
       })}
@@ -163,10 +176,9 @@ function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) 
             deck={paper(rig.sheetDeck)}
             boom={paper(rig.sheetBoom)}
             hitch={plan.setup.line.pull === 'deflected' ? paper(rig.hitch) : undefined}
-            parts={plan.boat.sails[plan.setup.source]?.sheetParts ?? 1}
             tensionN={moment.sheetN}
             slack={moment.sheetN < 2}
-            gap={2}
+            {...sheetInk}
           />
           <Tiller boat={plan.boat} rig={rig} scale={scale} />
           <ElasticCord
@@ -275,7 +287,7 @@ function SailNumbers(props: PlacedProps & { shapes: Shapes }) {
 }
 
 function ApparentWind(props: PlacedProps & { turn: number }) {
-  const { run, moment, measures, scale, onSheet, turn, width } = props
+  const { run, moment, scale, onSheet, turn } = props
   const { boat } = run.request.plan
   const mast = onSheet(onPaper({ x: mastX(boat), y: 0 }, scale))
   const fromDeg = turn + moment.apparentWindAngleDeg
@@ -283,19 +295,22 @@ function ApparentWind(props: PlacedProps & { turn: number }) {
   const away = { x: Math.sin(radians(fromDeg)), y: -Math.cos(radians(fromDeg)) }
   const tip = { x: mast.x + away.x * 7, y: mast.y + away.y * 7 }
   const tail = { x: tip.x + away.x * (length + 12), y: tip.y + away.y * (length + 12) }
+  // Further aft the arrow lies along the deck, where a word would hide what is rigged.
+  const overWater = Math.abs(moment.apparentWindAngleDeg) < 105
   return (
     <g>
       <WindArrow tipX={tip.x} tipY={tip.y} fromDeg={fromDeg} length={length} kind="apparent" />
-      <text
-        x={tenth(tail.x)}
-        y={tenth(tail.y + 5)}
-        textAnchor={Math.abs(away.x) < 0.5 ? 'middle' : away.x > 0 ? 'start' : 'end'}
-        className="fill-ink-soft stroke-paper [paint-order:stroke]"
-        strokeWidth={4}
-      >
-        {`${measures.windSpeed.format(moment.apparentWindSpeedKn)} ${measures.windSpeed.unit}`}
-        {width >= 600 && ' apparent'}
-      </text>
+      {overWater && (
+        <text
+          x={tenth(tail.x)}
+          y={tenth(tail.y + 5)}
+          textAnchor={Math.abs(away.x) < 0.5 ? 'middle' : away.x > 0 ? 'start' : 'end'}
+          className="fill-ink-soft stroke-paper [paint-order:stroke]"
+          strokeWidth={4}
+        >
+          apparent
+        </text>
+      )}
     </g>
   )
 }
@@ -305,9 +320,11 @@ interface TrueWindProps extends SeaTrialSheetProps {
   radius: number
 }
 
-/** At the top of the ring; it leans as the wind of the moment swings about the mean. */
+/** At the top of the ring; it leans as the wind of the moment swings about the mean. Its words are
+ * on the side she points to, the view from astern is on the other. */
 function TrueWind({ run, moment, measures, centre, radius, width, height }: TrueWindProps) {
   const length = clamp(moment.windSpeedKn * arrowScale(run), 16, topRoom({ width, height }) - 20)
+  const side = -tackOf(run.request.conditions)
   return (
     <g>
       <WindArrow
@@ -318,8 +335,9 @@ function TrueWind({ run, moment, measures, centre, radius, width, height }: True
         kind="true"
       />
       <text
-        x={centre.x + 26}
-        y={28}
+        x={centre.x + side * 24}
+        y={20}
+        textAnchor={side > 0 ? 'start' : 'end'}
         className="fill-ink stroke-paper [paint-order:stroke]"
         strokeWidth={4}
         style={{ fontWeight: 600 }}
@@ -333,24 +351,38 @@ function TrueWind({ run, moment, measures, centre, radius, width, height }: True
   )
 }
 
-/** Speed and leeway in figures, in the lower right corner. */
+/** Speed, leeway and apparent wind in figures, in the lower right corner. */
 function Going({ moment, measures, width, height }: SeaTrialSheetProps) {
-  const { boatSpeed, angle } = measures
+  const { boatSpeed, windSpeed, angle } = measures
+  const leeway = Math.abs(moment.leewayDeg)
+  const astern = leeway > 90
+  const apparent = angle.format(Math.abs(moment.apparentWindAngleDeg))
+  const narrow = width < 400
+  const edge = width - (narrow ? 38 : 70)
   const rows = [
-    { name: 'Speed', figure: boatSpeed.format(moment.speedKn), unit: boatSpeed.unit },
-    { name: 'Leeway', figure: angle.format(Math.abs(moment.leewayDeg)), unit: angle.unit },
+    {
+      name: 'Apparent',
+      figure: windSpeed.format(moment.apparentWindSpeedKn),
+      unit: narrow ? windSpeed.unit : `${windSpeed.unit}, ${apparent}°`,
+    },
+    {
+      name: astern ? 'Sternway' : 'Speed',
+      figure: boatSpeed.format(moment.speedKn),
+      unit: boatSpeed.unit,
+    },
+    { name: 'Leeway', figure: angle.format(astern ? 180 - leeway : leeway), unit: angle.unit },
   ]
   return rows.map(({ name, figure, unit }, index) => {
-    const y = height - 34 + 20 * index
+    const y = height - 46 + 18 * index
     return (
       <g key={name} className="stroke-paper [paint-order:stroke]" strokeWidth={4}>
-        <text x={width - 132} y={y} className="fill-ink-soft">
+        <text x={edge - 94} y={y} className="fill-ink-soft">
           {name}
         </text>
-        <text x={width - 44} y={y} textAnchor="end" style={{ fontWeight: 600 }}>
+        <text x={edge - 6} y={y} textAnchor="end" style={{ fontWeight: 600 }}>
           {figure}
         </text>
-        <text x={unit === '°' ? width - 43 : width - 38} y={y} className="fill-ink-soft">
+        <text x={unit === '°' ? edge - 5 : edge} y={y} className="fill-ink-soft">
           {unit}
         </text>
       </g>

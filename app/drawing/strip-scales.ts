@@ -140,7 +140,7 @@ export function stripLayout(run: Run, measures: Measures, size: Size): StripLayo
 
   const unit = angle.unit
   const plain = (measure: Measure) => (shown: number) => measure.format(shown / measure.factor)
-  const unsigned = (shown: number) => angle.format(Math.abs(shown / angle.factor))
+  const unsigned = (shown: number) => angle.format(Math.abs(wrapDegrees(shown / angle.factor)))
   const rows: Omit<Panel, 'top' | 'bottom' | 'y' | 'ticks'>[] = [
     {
       plot: 'course',

@@ -266,12 +266,12 @@ interface GhostsProps extends LayerProps {
   measures: Measures
 }
 
-/** Other helms on the same seed: course, heel and tiller, thin and dashed. */
+/** Other helms on the same seed: their courses, thin and dashed. */
 const Ghosts = memo(function Ghosts({ ghosts, measures, layout, clip }: GhostsProps) {
   return ghosts.map((ghost) => {
     const traces = tracesOf(ghost.run, measures)
     return layout.panels
-      .filter(({ plot }) => plot !== 'loads')
+      .filter(({ plot }) => plot === 'course')
       .map((panel) => (
         <g key={panel.plot} clipPath={`url(#${clip}-${panel.plot})`} className="fill-none">
           {traces[panel.plot].map((trace) => (

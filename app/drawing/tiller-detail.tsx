@@ -24,14 +24,14 @@ interface DetailView {
 
 /** Room under the ring for the scale bar and the letter. */
 const footPx = 34
-/** Room over the ring, so that the pulls stand clear of it. */
-const headPx = 16
+/** Room over the ring: the pulls stand in its corners, clear of it. */
+const headPx = 40
 
 function detailView(plan: TillerDetailProps['plan'], size: Size): DetailView {
   const frame = detailFrame(plan)
   const radius = Math.min(size.width / 2 - 2, (size.height - footPx - headPx) / 2)
   const scale = radius / frame.radiusM
-  const centre = { x: size.width / 2, y: headPx + radius }
+  const centre = { x: size.width / 2, y: headPx + (size.height - headPx - footPx) / 2 }
   const origin = onPaper(frame.centre, scale)
   return {
     frame,
@@ -45,37 +45,17 @@ function detailView(plan: TillerDetailProps['plan'], size: Size): DetailView {
   }
 }
 
-/** Where each part lies in the detail, for notes with leader lines. */
+/** Where the circled number of each part stands in the detail, for the notes beside it. */
 export function partAnchors(
-  props: Pick<TillerDetailProps, 'plan' | 'moment' | 'width' | 'height'>,
+  props: Pick<TillerDetailProps, 'plan' | 'width' | 'height'>,
 ): PartAnchors {
-  const { plan, moment } = props
-  const rig = rigGeometry(plan, moment)
-  if (!rig) return {}
-  const { place, centre, radius } = detailView(plan, props)
-  const within = (point: Point) => pulledWithin(place(point), centre, radius - 8)
-  const middle = (a: Point, b: Point) => ({ x: (a.x + b.x) / 2, y: (a.y + b.y) / 2 })
-  const anchors: Partial<Record<PartKey, Anchor>> = {
-    sheet: within(middle(rig.hitch, rig.sheetBoom)),
-    line: within(middle(rig.line[0] ?? rig.hitch, rig.line[1] ?? rig.tillerLine)),
-    tiller: within(rig.tillerTip),
-    'tiller-line': within(rig.tillerLine),
-    'tiller-elastic': within(rig.tillerElastic),
-    elastic: within(middle(rig.cordFrom, rig.tillerElastic)),
-    'elastic-anchor': within(rig.elasticAnchor),
-    [`reef.${plan.setup.source}`]: within(rig.sheetBoom),
-  }
-  if (plan.setup.line.pull === 'deflected') anchors.hitch = within(rig.hitch)
-  rig.leads.forEach((lead, index) => {
-    anchors[`lead.${index}`] = within(lead)
-  })
-  return anchors
-}
-
-function pulledWithin(point: Anchor, centre: Anchor, radius: number): Anchor {
-  const [dx, dy] = [point.x - centre.x, point.y - centre.y]
-  const part = Math.min(1, radius / (Math.hypot(dx, dy) || 1))
-  return { x: tenth(centre.x + dx * part), y: tenth(centre.y + dy * part) }
+  const { plan } = props
+  return Object.fromEntries(
+    standingNumbers(plan, detailView(plan, props)).map(({ key, at }) => [
+      key,
+      { x: tenth(at.x), y: tenth(at.y) },
+    ]),
+  )
 }
 
 /** Degrees clockwise from the top of the paper in which one point lies from another. */

@@ -51,19 +51,16 @@ export interface Measures {
 }
 
 /**
- * A part that can be pointed at: `sail.<id>`, `reef.<id>`, `sheet`, `hitch`, `line`, `lead.<n>`,
- * `tiller`, `tiller-line`, `tiller-elastic`, `elastic`, `elastic-anchor`.
+ * A part that can be pointed at: `sail.<id>`, `sheet`, `hitch`, `line`, `lead.<n>`, `tiller`,
+ * `elastic`, `elastic-anchor`.
  */
 export type PartKey =
   | `sail.${string}`
-  | `reef.${string}`
   | `lead.${number}`
   | 'sheet'
   | 'hitch'
   | 'line'
   | 'tiller'
-  | 'tiller-line'
-  | 'tiller-elastic'
   | 'elastic'
   | 'elastic-anchor'
 

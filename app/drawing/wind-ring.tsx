@@ -18,11 +18,6 @@ export function onRing(ring: Ring, courseDeg: number, radius = ring.radius): Anc
   }
 }
 
-/** On a phone: the course is written smaller. */
-function isSmall(ring: Ring): boolean {
-  return ring.radius < 160
-}
-
 function spoke(ring: Ring, courseDeg: number, from: number, to: number): string {
   const inner = onRing(ring, courseDeg, from)
   const outer = onRing(ring, courseDeg, to)
@@ -86,18 +81,20 @@ export const BandSector = memo(function BandSector({ ring, band }: { ring: Ring;
 
 interface RingFiguresProps {
   ring: Ring
-  /** Figures this near to the pointer give way to it. */
-  courseDeg: number
+  /** Courses written at the ring: the figures near them give way. */
+  written: readonly number[]
   format: (stored: number) => string
 }
 
-export function RingFigures({ ring, courseDeg, format }: RingFiguresProps) {
+export function RingFigures({ ring, written, format }: RingFiguresProps) {
   return (
     <g textAnchor="middle" className="fill-ink-soft">
       {everyThirty.map((course) => {
         if (course === 0) return null
         const at = onRing(ring, course, ring.radius + 24)
-        const near = Math.abs(wrapDegrees(course - courseDeg)) * radians(1) * ring.radius < 52
+        const near = written.some(
+          (other) => Math.abs(wrapDegrees(course - other)) * radians(1) * ring.radius < 52,
+        )
         return (
           <text
             key={course}
@@ -120,13 +117,14 @@ interface CoursePointerProps {
   text: string
   /** Where the dashed line of the keel begins, from the centre. */
   from: number
+  /** Where the sheet has little room beside the ring. */
+  small: boolean
 }
 
 /** The keel's line carried out to the ring, with her course to the wind. */
-export function CoursePointer({ ring, courseDeg, text, from }: CoursePointerProps) {
+export function CoursePointer({ ring, courseDeg, text, from, small }: CoursePointerProps) {
   const { radius } = ring
   const tip = onRing(ring, courseDeg, radius - 1)
-  const small = isSmall(ring)
   const sideways = small ? 2 : 16
   const label = onRing(
     ring,
@@ -168,41 +166,51 @@ export function CoursePointer({ ring, courseDeg, text, from }: CoursePointerProp
 interface GhostPointerProps {
   ring: Ring
   courseDeg: number
-  label: string
+  /** Null where there is no room for it; the strip names it all the same. */
+  label: string | null
   dash: string
-  /** 0 for the outer place of the name, 1 for the next within. */
-  place: number
-  /** Her own course: a name close to it would lie on her bow and says nothing. */
-  besideDeg: number
 }
 
-/** Another helm on the same seed: a dash within the ring, with its name. */
-export function GhostPointer(props: GhostPointerProps) {
-  const { ring, courseDeg, label, dash, place, besideDeg } = props
-  const clear = Math.abs(wrapDegrees(courseDeg - besideDeg)) > 25
-  // Names are broader than high: they need more room side by side than above each other.
-  const sideways = Math.abs(Math.sin(radians(courseDeg)))
-  const from = ring.radius - 30 - (24 + 26 * sideways) * place
-  const at = onRing(ring, courseDeg, from - 16 - 8 * sideways)
+/** Another helm on the same seed: a dash within the ring, with its name outside of it. */
+export function GhostPointer({ ring, courseDeg, label, dash }: GhostPointerProps) {
+  const at = onRing(ring, courseDeg, ring.radius + 12)
+  const aside = Math.sin(radians(-courseDeg))
   return (
     <g>
       <path
-        d={spoke(ring, courseDeg, from, ring.radius)}
+        d={spoke(ring, courseDeg, ring.radius - 26, ring.radius)}
         className="fill-none stroke-ink-soft"
         strokeWidth={1.5}
         strokeDasharray={dash}
       />
-      {clear && (
-        <text
-          x={at.x}
-          y={at.y + 5}
-          textAnchor="middle"
-          className="fill-ink-soft stroke-paper [paint-order:stroke]"
-          strokeWidth={4}
-        >
-          {label}
-        </text>
-      )}
+      <text
+        x={at.x}
+        y={tenth(at.y + 5 - 5 * Math.cos(radians(courseDeg)))}
+        textAnchor={Math.abs(aside) < 0.3 ? 'middle' : aside > 0 ? 'start' : 'end'}
+        className="fill-ink-soft stroke-paper [paint-order:stroke]"
+        strokeWidth={4}
+      >
+        {label}
+      </text>
     </g>
   )
+}
+
+/** Nearer to another name than this, along the ring, a ghost's gives way. */
+const nameRoomPx = 58
+
+/** Courses at which a name can stand: clear of her own course, of each other and of the wind. */
+export function namedCourses(
+  ring: Ring,
+  ownCourseDeg: number,
+  ghostCoursesDeg: readonly number[],
+): boolean[] {
+  const taken = [ownCourseDeg, 0]
+  return ghostCoursesDeg.map((course) => {
+    const clear = taken.every(
+      (other) => Math.abs(wrapDegrees(course - other)) * radians(1) * ring.radius > nameRoomPx,
+    )
+    if (clear) taken.push(course)
+    return clear
+  })
 }

@@ -11,7 +11,7 @@ interface Draft {
 /** A rule to drag and a box to type into: one control for one number. */
 export function NumberSlider(props: NumberSliderProps) {
   const { label, unit, unitName, value, min, max, step, mark, hint, error, disabled } = props
-  const { format, parse, onInput, onCommit, whole } = props
+  const { format, parse, onInput, onCommit, whole, tight = false } = props
   const id = useId()
   const rule = useRef<HTMLInputElement>(null)
   const latestEntry = useRef(0)
@@ -66,7 +66,7 @@ export function NumberSlider(props: NumberSliderProps) {
   return (
     <div className="text-note">
       <div className="flex items-end justify-between gap-3">
-        <label htmlFor={id} className="pb-2">
+        <label htmlFor={id} className={tight ? '-mt-2 pb-1.5' : 'pb-2'}>
           {label}
         </label>
         <span className="flex shrink-0 items-baseline gap-1.5">
@@ -85,7 +85,7 @@ export function NumberSlider(props: NumberSliderProps) {
             onBlur={leave}
             onKeyDown={boxKey}
             onFocus={(event) => event.target.select()}
-            className="h-touch w-20 border-b border-ink bg-transparent px-1 text-right text-body font-strong tabular-nums text-ink aria-invalid:border-b-3 disabled:text-ink-soft"
+            className={`h-touch w-20 border-b border-ink bg-transparent px-1 text-right text-body font-strong tabular-nums text-ink aria-invalid:border-b-3 disabled:text-ink-soft ${tight ? '-mt-3 pt-3' : ''}`}
           />
           <span className="w-9 text-ink-soft" aria-hidden="true">
             {unit}
@@ -95,7 +95,7 @@ export function NumberSlider(props: NumberSliderProps) {
           </span>
         </span>
       </div>
-      <div className="rule">
+      <div className={tight ? 'rule -mb-1' : 'rule'}>
         <div className="rule-scale">
           {mark !== undefined && <Change from={share(props, mark)} to={share(props, value)} />}
         </div>

@@ -29,6 +29,8 @@ export interface NumberSliderProps {
   /** From the model or the server: shown until the value changes. */
   error?: string | null
   disabled?: boolean
+  /** Lower, for a row of them along the head of a page; the box's target reaches above it. */
+  tight?: boolean
   /** Whole numbers only. */
   whole?: boolean
 }

@@ -16,6 +16,16 @@ export interface Difference {
 
 const PARTED_DEG = 1
 
+/**
+ * A run is the same on every machine, to the last bit: only the rounding of what a server sends may
+ * lie between two. Degrees, newtons.
+ */
+export const SAME_WITHIN = 1e-6
+
+export function isSame({ courseDeg, tillerDeg, lineN }: Difference): boolean {
+  return Math.max(courseDeg, tillerDeg, lineN) <= SAME_WITHIN
+}
+
 /** Compares at the times both have. */
 export function differenceOf(one: Traces, other: Traces): Difference {
   const most: Difference = { courseDeg: 0, tillerDeg: 0, lineN: 0, partedAtS: null }

@@ -1,9 +1,10 @@
 import { useMemo, useState } from 'react'
-import { momentAt } from '~/drawing/moment'
+import { balloonRadius } from '~/drawing/balloon'
+import { tenth } from '~/drawing/frame'
 import { SeaTrialSheet } from '~/drawing/sea-trial-sheet'
 import { SternView } from '~/drawing/stern-view'
 import { partAnchors, TillerDetail } from '~/drawing/tiller-detail'
-import type { Ghost, Measures, PartKey, Run, Size } from '~/drawing/types'
+import type { Anchor, Ghost, Measures, PartAnchors, PartKey, Run, Size } from '~/drawing/types'
 import { useAdjusting } from './adjusting'
 import { adjustable } from './adjustments'
 import { NOTE, type NotePlace, notePlaces } from './note-places'
@@ -59,10 +60,7 @@ function FromAstern({ run, playback, measures }: Props) {
   const { ref, size } = useSize<HTMLDivElement>({ width: 176, height: 144 })
   const corner = run.request.conditions.trueWindAngleDeg < 0 ? 'left-0' : 'right-0'
   return (
-    <div
-      ref={ref}
-      className={`absolute top-9 h-22 w-24 md:h-28 md:w-32 xl:top-0 xl:h-36 xl:w-44 ${corner}`}
-    >
+    <div ref={ref} className={`absolute top-0 h-22 w-24 md:h-28 md:w-28 xl:h-32 xl:w-40 ${corner}`}>
       <SternView
         {...size}
         plan={run.request.plan}
@@ -81,8 +79,7 @@ function SteeringGear({ run, playback, measures }: Props) {
   const [open, setOpen] = useState<PartKey | null>(null)
   const { ref, size } = useSize<HTMLDivElement>({ width: 400, height: 480 })
   const { parts } = adjustable(plan)
-  const start = useMemo(() => momentAt(run, 0), [run])
-  const anchors = partAnchors({ plan, moment: start, ...size })
+  const anchors = useMemo(() => partAnchors({ plan, ...size }), [plan, size])
   const places = notePlaces(
     parts.map(({ key }) => key),
     anchors,
@@ -99,6 +96,7 @@ function SteeringGear({ run, playback, measures }: Props) {
             playback={playback}
             measures={measures}
             size={size}
+            anchors={anchors}
             places={places}
             active={open}
           />
@@ -119,7 +117,7 @@ function SteeringGear({ run, playback, measures }: Props) {
           })}
         </div>
       </div>
-      <div className="grid grid-cols-3 gap-4 max-xl:hidden">
+      <div className="mt-2 grid grid-cols-3 gap-4 max-xl:hidden">
         {sails.map((part) => (
           <div key={part.key} className="relative h-touch">
             <div className={open === part.key ? `absolute bottom-0 left-0 ${openedNote}` : ''}>
@@ -139,14 +137,14 @@ function SteeringGear({ run, playback, measures }: Props) {
 
 interface DetailProps extends Omit<Props, 'ghosts'> {
   size: Size
+  anchors: PartAnchors
   places: readonly NotePlace[]
   active: PartKey | null
 }
 
-function Detail({ run, playback, measures, size, places, active }: DetailProps) {
+function Detail({ run, playback, measures, size, anchors, places, active }: DetailProps) {
   const { plan } = useAdjusting()
   const { moment } = useMoment(run, playback)
-  const anchors = partAnchors({ plan, moment, ...size })
   return (
     <div className="relative h-full">
       <TillerDetail
@@ -168,7 +166,7 @@ function Detail({ run, playback, measures, size, places, active }: DetailProps) 
           return (
             <path
               key={part}
-              d={`M${x} ${top + NOTE.height / 2}L${at.x} ${at.y}`}
+              d={leader({ x, y: top + NOTE.height / 2 }, at)}
               className={active === part ? 'stroke-ink' : 'stroke-ink-pale'}
               strokeWidth={1}
             />
@@ -177,4 +175,11 @@ function Detail({ run, playback, measures, size, places, active }: DetailProps) 
       </svg>
     </div>
   )
+}
+
+/** From a note to the rim of its circled number. */
+function leader(from: Anchor, to: Anchor): string {
+  const [dx, dy] = [to.x - from.x, to.y - from.y]
+  const part = 1 - balloonRadius / (Math.hypot(dx, dy) || 1)
+  return `M${from.x} ${from.y}L${tenth(from.x + dx * part)} ${tenth(from.y + dy * part)}`
 }

@@ -1,3 +1,4 @@
+import { spread } from '~/drawing/strip-labels'
 import type { Anchor, PartAnchors, PartKey, Size } from '~/drawing/types'
 
 export const NOTE = { width: 184, height: 52 } as const
@@ -12,8 +13,9 @@ export interface NotePlace {
 }
 
 /**
- * Puts the notes of a drawing into a column on either side of it: each on the side its part is on,
- * as far as there is room, and in the order of the parts, so that leader lines do not cross.
+ * Puts the notes of a drawing into a column on either side of it, about as many on each, beside
+ * their parts as far as there is room and in the order of the parts, so that leader lines are short
+ * and do not cross.
  */
 export function notePlaces(
   parts: readonly PartKey[],
@@ -28,7 +30,9 @@ export function notePlaces(
     })
     .sort((a, b) => a.at.x - b.at.x)
   const middle = anchored.filter(({ at }) => at.x < drawing.width / 2).length
-  const left = Math.min(room, Math.max(anchored.length - room, middle))
+  const half = anchored.length / 2
+  const even = Math.min(Math.ceil(half), Math.max(Math.floor(half), middle))
+  const left = Math.min(room, Math.max(anchored.length - room, even))
   return [
     ...column(anchored.slice(0, left), 'left', drawing),
     ...column(anchored.slice(left), 'right', drawing),
@@ -40,12 +44,12 @@ function column(
   side: Side,
   drawing: Size,
 ): NotePlace[] {
-  const gap = Math.max(0, drawing.height - notes.length * NOTE.height) / (notes.length + 1)
-  return notes
-    .toSorted((a, b) => a.at.y - b.at.y)
-    .map(({ part }, index) => ({
-      part,
-      side,
-      top: Math.round(gap + index * (NOTE.height + gap)),
-    }))
+  const inOrder = notes.toSorted((a, b) => a.at.y - b.at.y)
+  const tops = spread(
+    inOrder.map(({ at }) => Math.round(at.y - NOTE.height / 2)),
+    NOTE.height,
+    0,
+    Math.floor(drawing.height) - NOTE.height,
+  )
+  return inOrder.map(({ part }, index) => ({ part, side, top: tops[index] ?? 0 }))
 }

@@ -6,7 +6,7 @@ import { ChoiceField } from '~/ui/choice-field'
 import { NumberSlider } from '~/ui/number-slider'
 import { useAdjusting } from './adjusting'
 
-/** The control of one value of the plan; `brief` leaves out what the value does. */
+/** The control of one value of the plan; `brief` is lower and leaves out what the value does. */
 export function ParameterField({ name, brief = false }: { name: string; brief?: boolean }) {
   const { plan } = useAdjusting()
   const parameter = parameterAt(plan, name)
@@ -49,6 +49,7 @@ function QuantityField({ name, parameter, brief }: QuantityFieldProps) {
       }}
       mark={own}
       hint={brief ? undefined : effect}
+      tight={brief}
       error={refusals[name]}
       whole={whole}
     />

@@ -20,7 +20,7 @@ export function StepTools({ history, dispatch }: Omit<Props, 'run'>) {
   const { present, past, future } = history
   const untouched = queryOf(present) === queryOf(startOf(present.setupId))
   return (
-    <div className="steps flex flex-wrap items-end gap-x-4 md:justify-end">
+    <div className="flex items-center gap-x-3 max-md:order-last max-md:gap-x-1">
       <Button weight="word" disabled={past.length === 0} onClick={() => dispatch({ type: 'undo' })}>
         Undo
       </Button>
@@ -94,7 +94,7 @@ export function RunTools({ history, run, dispatch }: Props) {
         </select>
       </label>
       <fieldset className="flex items-center gap-x-4">
-        <legend className="float-left mr-3 text-ink-soft">Beside her</legend>
+        <legend className="float-left mr-3 text-ink-soft">Beside her, the tiller</legend>
         {allGhosts.map((ghost) => (
           <label key={ghost} className="flex h-touch items-center gap-2">
             <input

@@ -16,7 +16,7 @@ import { PlayBar } from './play-bar'
 import { Readings } from './readings'
 import { refusalsOf, requestOf } from './request'
 import { RunTools, StepTools } from './run-tools'
-import { SetupPicker } from './setup-picker'
+import { AboutSetup, SetupPicker } from './setup-picker'
 import { resultOf, type Sketch } from './sketch'
 import type { TrialState } from './state'
 import { TimeStrip } from './time-strip'
@@ -28,7 +28,7 @@ import { useTrial } from './use-trial'
 import { useTrialState } from './use-trial-state'
 import { Verdict } from './verdict'
 import { Weather } from './weather'
-import { refusalsInWords, weatherInWords } from './wording'
+import { refusalsInWords } from './wording'
 
 interface Props {
   entries: SetupEntry[]
@@ -82,14 +82,18 @@ export function SeaTrial(opening: Props) {
   return (
     <AdjustingProvider value={adjusting}>
       <title>{`${plan.setup.name}, ${plan.boat.name} · Sea trial · Counterhelm`}</title>
-      <Masthead
-        inHand={{
-          boat: plan.boat.name,
-          setup: plan.setup.name,
-          weather: weatherInWords(plan.setup.conditions, units),
-          query: queryOf(state),
-        }}
-      />
+      <Masthead query={queryOf(state)}>
+        <SetupPicker
+          entries={entries}
+          setupId={state.setupId}
+          units={units}
+          onChoose={(setupId) => {
+            setRemarks([])
+            dispatch({ type: 'choose-setup', setupId })
+          }}
+        />
+        <StepTools history={history} dispatch={dispatch} />
+      </Masthead>
       <main data-computing={computing || undefined} onPointerUp={letGo}>
         <h1 className="sr-only">Sea trial</h1>
         {remarks.length > 0 && (
@@ -113,19 +117,10 @@ export function SeaTrial(opening: Props) {
             a run computed by the server. Playing and adjusting need JavaScript.
           </p>
         </noscript>
-        <div className="trial-sheet px-4 pt-3 md:px-margin">
-          <SetupPicker
-            entries={entries}
-            setupId={state.setupId}
-            units={units}
-            onChoose={(setupId) => {
-              setRemarks([])
-              dispatch({ type: 'choose-setup', setupId })
-            }}
-          />
-          <StepTools history={history} dispatch={dispatch} />
+        <div className="trial-sheet px-4 pt-2 md:px-margin">
           <Weather />
           <Drawings run={run} ghosts={ghosts} playback={playback} measures={measures} />
+          <AboutSetup entries={entries} setupId={state.setupId} />
           <div ref={titleRef} className="verdict">
             <Verdict run={run} refusals={refusals} fault={fault} />
           </div>

@@ -34,44 +34,59 @@ export function SetupPicker({ entries, setupId, units, onChoose }: Props) {
     <form
       method="get"
       action="/"
-      className="picker grid min-w-0 gap-x-6 xl:grid-cols-[minmax(24rem,34rem)_1fr]"
+      className="flex min-w-0 flex-wrap items-center gap-x-2 max-md:order-last max-md:basis-full"
     >
-      <div className="text-note">
-        <label htmlFor="setup">Boat and setup</label>
-        <select
-          id="setup"
-          name="setup"
-          value={setupId}
-          onChange={(event) => void choose(event.target.value)}
-          className="h-touch w-full border-b border-ink pl-1 text-body font-strong text-ink"
-        >
-          {grouped(entries).map(({ boat, setups }) => (
-            <optgroup key={boat.id} label={`${boat.name}, ${boat.type}`}>
-              {setups.map((entry) => (
-                <option key={entry.id} value={entry.id}>
-                  {entry.flaw ? 'Wrong on purpose: ' : ''}
-                  {entry.name} ({weatherInWords(entry.conditions, units)})
-                </option>
-              ))}
-            </optgroup>
-          ))}
-        </select>
-        <noscript>
-          <button type="submit" className="mt-2 min-h-touch border border-ink px-4">
-            Take this setup
-          </button>
-        </noscript>
-      </div>
-      <div className="max-w-measure text-note max-xl:mt-1 xl:self-end">
-        <p className="text-ink-soft max-md:line-clamp-2">{chosen?.summary}</p>
-        {chosen?.flaw && (
-          <p className="border-l-2 border-ink pl-3">Wrong on purpose: {chosen.flaw.text}</p>
-        )}
-      </div>
-      <p role="alert" className="text-note">
+      <label htmlFor="setup" className="font-strong">
+        <span className="sr-only">Setup of </span>
+        {chosen?.boat.name}
+      </label>
+      <select
+        id="setup"
+        name="setup"
+        value={setupId}
+        onChange={(event) => void choose(event.target.value)}
+        className="h-touch min-w-0 max-w-full text-ellipsis border-b border-ink pl-1 text-ink max-md:flex-1"
+      >
+        {grouped(entries).map(({ boat, setups }) => (
+          <optgroup key={boat.id} label={`${boat.name}, ${boat.type}`}>
+            {setups.map((entry) => (
+              <option key={entry.id} value={entry.id}>
+                {entry.flaw ? `${entry.name} (wrong on purpose)` : entry.name}
+              </option>
+            ))}
+          </optgroup>
+        ))}
+      </select>
+      {chosen && (
+        <span className="text-ink-soft max-2xl:hidden">
+          kept for {weatherInWords(chosen.conditions, units)}
+        </span>
+      )}
+      <noscript>
+        <button type="submit" className="min-h-touch border border-ink px-4">
+          Take this setup
+        </button>
+      </noscript>
+      <p role="alert" className="basis-full empty:hidden">
         {fault}
       </p>
     </form>
+  )
+}
+
+/** What the setup in hand is, as a note on the sheet. */
+export function AboutSetup({ entries, setupId }: Pick<Props, 'entries' | 'setupId'>) {
+  const chosen = entries.find((entry) => entry.id === setupId)
+  if (!chosen) return null
+  return (
+    <div className="about max-w-measure text-note text-ink-soft">
+      <p>{chosen.summary}</p>
+      {chosen.flaw && (
+        <p className="mt-1 border-l-2 border-ink pl-2 text-ink">
+          Wrong on purpose: {chosen.flaw.text}
+        </p>
+      )}
+    </div>
   )
 }
 

@@ -62,7 +62,7 @@ export function TimeStrip({ run, ghosts, plan, eventCount, playback, measures, d
           {full && `No more than ${MOST_EVENTS} events; remove one first.`}
         </span>
       </div>
-      <div ref={ref} className="h-80 min-w-0 xl:h-auto xl:min-h-80 xl:flex-1">
+      <div ref={ref} className="-mt-1 h-100 min-w-0 xl:h-auto xl:min-h-104 xl:flex-1">
         <Strip
           {...size}
           run={run}

@@ -7,7 +7,7 @@ import { simulateAnswerSchema } from '~/features/simulate/answer'
 import type { SimulateBody } from '~/features/simulate/schema'
 import { inWords, rounded, type Units } from '~/features/units/units'
 import { Button } from '~/ui/button'
-import { type Difference, differenceOf } from './difference'
+import { type Difference, differenceOf, isSame } from './difference'
 import type { TrialState } from './state'
 import { useLongJob } from './use-long-job'
 import { clock } from './wording'
@@ -126,7 +126,7 @@ function OtherMachine({ run, state, units }: Props) {
   return (
     <Question
       title="Another machine"
-      text="The run drawn was computed by this browser. The server computes it again; machines round the last figure differently, and a boat that is hard to steer makes much of it."
+      text="The run drawn was computed by this browser. The server computes it again: a run is meant to be the same on every machine."
       button="Compare with the server"
       running={server.isPending}
       onAsk={() => server.mutate()}
@@ -165,6 +165,7 @@ async function simulateOnServer(state: TrialState) {
 }
 
 function differenceInWords(other: string, difference: Difference, units: Units): string {
+  if (isSame(difference)) return `To the last figure the same as the ${other}.`
   const course = inWords(rounded('deg', difference.courseDeg, units, 0.001))
   const tiller = inWords(rounded('deg', difference.tillerDeg, units, 0.001))
   const line = inWords(rounded('N', difference.lineN, units, 0.01))

@@ -5,7 +5,7 @@ import { newestOnly } from '~/workers/newest-only'
 import { startTrialThread, type TrialThread } from '~/workers/trials'
 import type { Ghost } from './state'
 
-export const ghostLabels: Record<Ghost, string> = { lashed: 'tiller lashed', free: 'tiller free' }
+export const ghostLabels: Record<Ghost, string> = { lashed: 'lashed', free: 'free' }
 
 export interface Trial {
   /** The newest run there is: the server's at first, then this browser's own. */

@@ -2,20 +2,18 @@ import type { ReactNode } from 'react'
 import { Link, NavLink } from 'react-router'
 import { PreferencesForm } from '../preferences/preferences-form'
 
-export interface InHand {
-  boat: string
-  setup: string
-  weather: string
+interface Props {
   /** Query that carries the setup in hand, with what was changed, to the other pages. */
-  query: string
+  query?: string
+  /** Which boat and setup is in hand, and what a page lets one do with it as a whole. */
+  children?: ReactNode
 }
 
 /** The thin line at the head of every page: where one is, and which setup is in hand. */
-export function Masthead({ inHand }: { inHand?: InHand }) {
-  const query = inHand?.query ?? ''
+export function Masthead({ query = '', children }: Props) {
   return (
     <header className="border-b border-hair text-note">
-      <div className="flex flex-wrap items-center gap-x-6 px-4 md:px-margin">
+      <div className="flex flex-wrap items-center gap-x-3 px-4 md:gap-x-6 md:px-margin">
         <Link to="/" className="flex h-touch items-center font-strong">
           Counterhelm
         </Link>
@@ -27,15 +25,14 @@ export function Masthead({ inHand }: { inHand?: InHand }) {
             Sea trial
           </NavLink>
         </nav>
-        {inHand && (
-          <p className="order-last min-w-0 basis-full truncate pb-2 text-ink-soft md:order-none md:flex-1 md:basis-0 md:pb-0">
-            <span className="sr-only">In hand: </span>
-            <span className="text-ink">{inHand.boat}</span>, {inHand.setup}, {inHand.weather}
-          </p>
+        {children && (
+          <div className="flex min-w-0 flex-1 flex-wrap items-center gap-x-6 max-xl:order-last max-xl:basis-full max-md:contents">
+            {children}
+          </div>
         )}
         <a
           href="#cautions"
-          className="flex min-h-6 items-center underline underline-offset-4 max-lg:order-last max-lg:basis-full max-lg:pb-2 lg:min-h-touch"
+          className="flex min-h-touch items-center underline underline-offset-4 max-md:order-last"
         >
           Steers no boat: keep a look-out
         </a>
@@ -49,7 +46,7 @@ export function Masthead({ inHand }: { inHand?: InHand }) {
 
 function Folded({ title, children }: { title: string; children: ReactNode }) {
   return (
-    <details className="ml-auto open:basis-full open:pb-3">
+    <details className="ml-auto open:order-last open:basis-full open:pb-3">
       <summary className="flex h-touch cursor-pointer list-none items-center underline underline-offset-4 [&::-webkit-details-marker]:hidden">
         {title}
       </summary>

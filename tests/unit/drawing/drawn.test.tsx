@@ -68,17 +68,16 @@ describe('Every drawing', () => {
       expect(renderToStaticMarkup(drawn)).not.toMatch(/NaN|Infinity|undefined/)
   })
 
-  test('of the detail stays within its ring, notes and all', () => {
+  test('of the detail has every number within its ring', () => {
     for (const [, plan] of plans) {
-      const run = sailed(plan, { durationS: 4 })
-      const anchors = partAnchors({ plan, moment: momentAt(run, 2), width: 400, height: 450 })
+      const anchors = partAnchors({ plan, width: 400, height: 450 })
       expect(Object.keys(anchors)).toEqual(
-        expect.arrayContaining(['sheet', 'line', 'lead.0', 'tiller-line', 'elastic-anchor']),
+        expect.arrayContaining(['sheet', 'line', 'lead.0', 'tiller', 'elastic-anchor']),
       )
       for (const at of Object.values(anchors))
         expect(
-          Math.hypot((at?.x ?? Number.NaN) - 200, (at?.y ?? Number.NaN) - 216),
-        ).toBeLessThanOrEqual(200)
+          Math.hypot((at?.x ?? Number.NaN) - 200, (at?.y ?? Number.NaN) - 228),
+        ).toBeLessThanOrEqual(188)
     }
   })
 })

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest'
-import { differenceOf, type Traces } from '~/features/sea-trial/difference'
+import { differenceOf, isSame, type Traces } from '~/features/sea-trial/difference'
 
 const run = (course: (number | null)[], timeS = course.map((_, n) => n)): Traces => ({
   timeS,
@@ -19,6 +19,12 @@ test('a run does not differ from itself', () => {
 
 test('courses are compared the short way round', () => {
   expect(differenceOf(run([179]), run([-179])).courseDeg).toBe(2)
+  expect(differenceOf(run([359.9]), run([0])).courseDeg).toBeCloseTo(0.1)
+})
+
+test('what rounding to six decimals leaves between two runs makes no difference, more does', () => {
+  expect(isSame(differenceOf(run([60.0000004]), run([60])))).toBe(true)
+  expect(isSame(differenceOf(run([60.000002]), run([60])))).toBe(false)
 })
 
 test('runs with other output times are compared at the times both have', () => {
