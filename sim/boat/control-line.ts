@@ -2,7 +2,7 @@ import { atan2, cos, hypot, sin } from '../elementary'
 import type { Plan } from '../plan/types'
 import { leadExponent } from '../steering/leads'
 import { ropeStrength } from '../steering/rope'
-import type { VesselSail } from './vessel'
+import type { VesselSail } from './vessel-sail'
 
 /** Geometry and stiffness of control line and elastic, SI, deck frame (y to starboard), on the tack sailed. */
 export interface ControlLine {

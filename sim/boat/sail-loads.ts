@@ -7,7 +7,8 @@ import { fullness, sailCentre, sailDrag, sailLift } from '../sails/coefficients'
 import { shiftShape } from '../wind/gust'
 import type { LineSolver } from './line-pull'
 import { BOOM, HEEL, ROLL_RATE, RUDDER, SURGE, SWAY, YAW_RATE } from './state'
-import { effortHeight, reefedArea, type Vessel } from './vessel'
+import type { Vessel } from './vessel'
+import { effortHeight, reefedArea } from './vessel-sail'
 
 /** Lag of a boom behind where the wind carries it, s. */
 const BOOM_LAG = 0.35
