@@ -103,8 +103,8 @@ export function tracesOf(run: Run, measures: Measures): Record<Panel['plot'], Tr
   }
 }
 
-/** Widest the course plot opens either side of the band, degrees. */
-const widestDeg = 75
+/** Widest the course plot opens either side of the band, degrees: all the way round. */
+const widestDeg = 180
 
 function courseDomain(run: Run, trace: Trace, measure: Measure): [number, number] {
   const { band } = run.result

@@ -1,5 +1,6 @@
 import { memo, type PointerEvent, useId, useMemo } from 'react'
 import { judgingParameters } from 'sim/parameters/judging'
+import { clock } from './clock'
 import { tackOf, tenth } from './frame'
 import { ghostDash } from './ghost-dash'
 import { sampleAt } from './moment'
@@ -30,6 +31,11 @@ export function Strip(props: StripProps) {
     () => layout.panels.map((panel) => namesOn(panel, ghosts, measures)),
     [layout, ghosts, measures],
   )
+  const paths = useMemo(
+    () =>
+      layout.panels.map((panel) => panel.traces.map((trace) => pathOn(run, layout, panel, trace))),
+    [run, layout],
+  )
   const cursor = tenth(layout.x(cursorS))
 
   function scrub(event: PointerEvent<SVGSVGElement>) {
@@ -58,10 +64,10 @@ export function Strip(props: StripProps) {
       <Ground run={run} layout={layout} clip={`${id}-plot`} />
       <Ghosts run={run} ghosts={ghosts} measures={measures} layout={layout} clip={`${id}-plot`} />
       <g clipPath={`url(#${id}-future)`}>
-        <Traces run={run} layout={layout} clip={`${id}-plot`} past={false} />
+        <Traces layout={layout} paths={paths} clip={`${id}-plot`} past={false} />
       </g>
       <g clipPath={`url(#${id}-past)`}>
-        <Traces run={run} layout={layout} clip={`${id}-plot`} past />
+        <Traces layout={layout} paths={paths} clip={`${id}-plot`} past />
       </g>
       <EndNames layout={layout} names={names} />
       <Cursor run={run} cursorS={cursorS} width={width} layout={layout} names={names} />
@@ -227,19 +233,21 @@ const inks = {
   sheet: { past: 'stroke-ink', future: 'stroke-ink-pale', width: 1, dash: undefined },
 } as const
 
-interface TracesProps extends LayerProps {
+interface TracesProps extends Omit<LayerProps, 'run'> {
+  /** Path data of every trace, panel by panel: the past and the future show the same. */
+  paths: readonly string[][]
   past: boolean
 }
 
-const Traces = memo(function Traces({ run, layout, clip, past }: TracesProps) {
-  return layout.panels.map((panel) => (
+const Traces = memo(function Traces({ layout, paths, clip, past }: TracesProps) {
+  return layout.panels.map((panel, row) => (
     <g key={panel.plot} clipPath={`url(#${clip}-${panel.plot})`} className="fill-none">
-      {panel.traces.map((trace) => {
+      {panel.traces.map((trace, order) => {
         const ink = inks[trace.ink]
         return (
           <path
             key={trace.name}
-            d={pathOn(run, layout, panel, trace)}
+            d={paths[row]?.[order]}
             className={past ? ink.past : ink.future}
             strokeWidth={past ? ink.width : Math.min(1, ink.width)}
             strokeDasharray={ink.dash}
@@ -251,10 +259,19 @@ const Traces = memo(function Traces({ run, layout, clip, past }: TracesProps) {
   ))
 })
 
-function pathOn(run: Run, layout: StripLayout, panel: Panel, trace: Trace): string {
+function pathOn(
+  run: Run,
+  layout: StripLayout,
+  panel: Panel,
+  trace: Trace,
+  untilS = Number.POSITIVE_INFINITY,
+): string {
+  const { timeS } = run.result.series
+  const beyond = timeS.findIndex((time) => time > untilS)
+  const end = beyond === -1 ? timeS.length : beyond
   return tracePath(
-    run.result.series.timeS,
-    trace.values,
+    timeS.subarray(0, end),
+    trace.values.subarray(0, end),
     straight(layout.x),
     straight(panel.y),
     panel.plot === 'course' ? Math.abs(panel.y(180) - panel.y(0)) : undefined,
@@ -266,7 +283,7 @@ interface GhostsProps extends LayerProps {
   measures: Measures
 }
 
-/** Other helms on the same seed: their courses, thin and dashed. */
+/** Other helms on the same seed: their courses, thin and dashed, for as long as they kept one. */
 const Ghosts = memo(function Ghosts({ ghosts, measures, layout, clip }: GhostsProps) {
   return ghosts.map((ghost) => {
     const traces = tracesOf(ghost.run, measures)
@@ -277,7 +294,7 @@ const Ghosts = memo(function Ghosts({ ghosts, measures, layout, clip }: GhostsPr
           {traces[panel.plot].map((trace) => (
             <path
               key={trace.name}
-              d={pathOn(ghost.run, layout, panel, trace)}
+              d={pathOn(ghost.run, layout, panel, trace, ghost.run.result.metrics.lastedS)}
               className="stroke-ink-soft"
               strokeWidth={0.9}
               strokeDasharray={ghostDash[ghost.helm]}
@@ -313,7 +330,7 @@ function namesOn(panel: Panel, ghosts: readonly Ghost[], measures: Measures): En
     for (const ghost of ghosts)
       names.push({
         key: ghost.helm,
-        text: ghost.label,
+        text: ghostName(ghost),
         y: endOn(panel, tracesOf(ghost.run, measures).course[0]),
         className: 'fill-ink-soft',
       })
@@ -324,6 +341,12 @@ function namesOn(panel: Panel, ghosts: readonly Ghost[], measures: Measures): En
     panel.bottom - 4,
   )
   return names.map((name, index) => ({ ...name, y: heights[index] ?? name.y }))
+}
+
+/** With the moment until which she kept a course, if she lost it: her trace ends there. */
+function ghostName({ label, run }: Ghost): string {
+  const { lastedS } = run.result.metrics
+  return lastedS < run.request.durationS - 1 ? `${label} to ${clock(lastedS)}` : label
 }
 
 interface EndNamesProps {

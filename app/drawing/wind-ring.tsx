@@ -173,7 +173,7 @@ interface GhostPointerProps {
 
 /** Another helm on the same seed: a dash within the ring, with its name outside of it. */
 export function GhostPointer({ ring, courseDeg, label, dash }: GhostPointerProps) {
-  const at = onRing(ring, courseDeg, ring.radius + 12)
+  const at = onRing(ring, courseDeg, ring.radius + 15)
   const aside = Math.sin(radians(-courseDeg))
   return (
     <g>

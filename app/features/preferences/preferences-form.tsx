@@ -11,7 +11,7 @@ export function PreferencesForm() {
     <fetcher.Form
       method="post"
       action={PREFERENCES_PATH}
-      className="flex flex-wrap items-end gap-x-6 gap-y-3"
+      className="flex flex-wrap items-end gap-x-6 gap-y-3 md:justify-end"
       onChange={(event) => {
         const chosen = new FormData(event.currentTarget)
         chosen.delete('back')

@@ -23,7 +23,7 @@ interface Props {
 
 /** The boat from above, from astern, and her steering gear with a note on each part. */
 export function Drawings(props: Props) {
-  const { ref, size } = useSize<HTMLDivElement>({ width: 640, height: 520 })
+  const { ref, size } = useSize<HTMLDivElement>({ width: 684, height: 468 })
   return (
     <>
       <div className="sheet relative min-w-0">
@@ -57,7 +57,7 @@ function FromAbove({ run, ghosts, playback, measures, size }: Props & { size: Si
 /** In the corner she points away from. */
 function FromAstern({ run, playback, measures }: Props) {
   const { moment } = useMoment(run, playback)
-  const { ref, size } = useSize<HTMLDivElement>({ width: 176, height: 144 })
+  const { ref, size } = useSize<HTMLDivElement>({ width: 160, height: 128 })
   const corner = run.request.conditions.trueWindAngleDeg < 0 ? 'left-0' : 'right-0'
   return (
     <div ref={ref} className={`absolute top-0 h-22 w-24 md:h-28 md:w-28 xl:h-32 xl:w-40 ${corner}`}>
@@ -77,7 +77,7 @@ const openedNote = 'z-20 max-h-[70dvh] w-80 overflow-y-auto bg-cloth px-3 outlin
 function SteeringGear({ run, playback, measures }: Props) {
   const { plan } = useAdjusting()
   const [open, setOpen] = useState<PartKey | null>(null)
-  const { ref, size } = useSize<HTMLDivElement>({ width: 400, height: 480 })
+  const { ref, size, measured } = useSize<HTMLDivElement>({ width: 292, height: 414 })
   const { parts } = adjustable(plan)
   const anchors = useMemo(() => partAnchors({ plan, ...size }), [plan, size])
   const places = notePlaces(
@@ -97,7 +97,7 @@ function SteeringGear({ run, playback, measures }: Props) {
             measures={measures}
             size={size}
             anchors={anchors}
-            places={places}
+            places={measured ? places : []}
             active={open}
           />
         </div>
@@ -108,7 +108,7 @@ function SteeringGear({ run, playback, measures }: Props) {
             return (
               <div
                 key={key}
-                className={`absolute ${side === 'left' ? 'right-[calc(100%-11.5rem)]' : 'left-[calc(100%-11.5rem)]'} ${open === key ? openedNote : ''}`}
+                className={`absolute ${side === 'left' ? 'right-[calc(100%-11.5rem)]' : 'right-0'} ${open === key ? openedNote : ''}`}
                 style={{ top, width: open === key ? undefined : NOTE.width }}
               >
                 <PartNote part={part} open={open === key} onToggle={() => toggle(key)} leadsIn />
@@ -138,6 +138,7 @@ function SteeringGear({ run, playback, measures }: Props) {
 interface DetailProps extends Omit<Props, 'ghosts'> {
   size: Size
   anchors: PartAnchors
+  /** Of the notes that leader lines run to: none while the page does not know its size. */
   places: readonly NotePlace[]
   active: PartKey | null
 }

@@ -1,4 +1,5 @@
 import type { TrialEvent } from 'sim/plan/types'
+import { clock } from '~/drawing/clock'
 import { readEntry } from '~/features/units/entry'
 import { reading, shownUnit, spokenUnit } from '~/features/units/units'
 import { Button } from '~/ui/button'
@@ -6,7 +7,7 @@ import { ChoiceField } from '~/ui/choice-field'
 import { NumberSlider } from '~/ui/number-slider'
 import { useAdjusting } from './adjusting'
 import { type EventField, fieldsOf, reefable } from './event-fields'
-import { clock, eventInWords, eventNames } from './wording'
+import { eventInWords, eventNames } from './wording'
 
 interface Props {
   events: readonly TrialEvent[]

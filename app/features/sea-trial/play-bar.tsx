@@ -1,7 +1,7 @@
+import { clock } from '~/drawing/clock'
 import { Button } from '~/ui/button'
 import { type Playback, type Speed, STEP_S, speeds } from './playback'
 import { usePlayhead } from './use-playback'
-import { clock } from './wording'
 
 interface Props {
   playback: Playback

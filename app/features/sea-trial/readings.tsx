@@ -1,8 +1,8 @@
 import { useEffect, useState } from 'react'
+import { clock } from '~/drawing/clock'
 import { readings } from '~/drawing/readings'
 import type { Measures, Run } from '~/drawing/types'
 import type { Playback } from './playback'
-import { clock } from './wording'
 
 interface Props {
   run: Run

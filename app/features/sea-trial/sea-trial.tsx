@@ -122,7 +122,7 @@ export function SeaTrial(opening: Props) {
           <Drawings run={run} ghosts={ghosts} playback={playback} measures={measures} />
           <AboutSetup entries={entries} setupId={state.setupId} />
           <div ref={titleRef} className="verdict">
-            <Verdict run={run} refusals={refusals} fault={fault} />
+            <Verdict run={run} units={units} refusals={refusals} fault={fault} />
           </div>
           <div className="strip flex min-w-0 flex-col">
             <TimeStrip

@@ -1,5 +1,6 @@
 import { type Dispatch, useState } from 'react'
 import type { Plan, TrialEvent } from 'sim/plan/types'
+import { clock } from '~/drawing/clock'
 import { Strip } from '~/drawing/strip'
 import type { Ghost, Measures, Run } from '~/drawing/types'
 import { Button } from '~/ui/button'
@@ -8,7 +9,7 @@ import type { Playback } from './playback'
 import { type Action, MOST_EVENTS } from './state'
 import { usePlayhead } from './use-playback'
 import { useSize } from './use-size'
-import { clock, eventNames } from './wording'
+import { eventNames } from './wording'
 
 interface Props {
   run: Run
@@ -26,7 +27,7 @@ const kinds = Object.keys(eventNames) as TrialEvent['kind'][]
 export function TimeStrip({ run, ghosts, plan, eventCount, playback, measures, dispatch }: Props) {
   const { timeS } = usePlayhead(playback)
   const [taken, setTaken] = useState<TrialEvent['kind'] | null>(null)
-  const { ref, size } = useSize<HTMLDivElement>({ width: 960, height: 320 })
+  const { ref, size } = useSize<HTMLDivElement>({ width: 920, height: 440 })
   const full = eventCount >= MOST_EVENTS
 
   function drop(atS: number) {

@@ -2,6 +2,7 @@ import { useMutation } from '@tanstack/react-query'
 import { proxy } from 'comlink'
 import { type ReactNode, useState } from 'react'
 import type { HoldRate } from 'sim/trial/hold-rate'
+import { clock } from '~/drawing/clock'
 import type { Run } from '~/drawing/types'
 import { simulateAnswerSchema } from '~/features/simulate/answer'
 import type { SimulateBody } from '~/features/simulate/schema'
@@ -10,7 +11,6 @@ import { Button } from '~/ui/button'
 import { type Difference, differenceOf, isSame } from './difference'
 import type { TrialState } from './state'
 import { useLongJob } from './use-long-job'
-import { clock } from './wording'
 
 const SEEDS = 10
 

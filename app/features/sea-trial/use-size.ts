@@ -1,10 +1,11 @@
 import { useEffect, useRef, useState } from 'react'
 import type { Size } from '~/drawing/types'
 
-/** The size of an element in whole pixels; `first` until the page knows it. */
+/** The size of an element in whole pixels; until it is measured `first`, that of a common screen. */
 export function useSize<Kind extends HTMLElement>(first: Size) {
   const ref = useRef<Kind>(null)
   const [size, setSize] = useState(first)
+  const [measured, setMeasured] = useState(false)
   useEffect(() => {
     const element = ref.current
     if (!element) return
@@ -13,6 +14,7 @@ export function useSize<Kind extends HTMLElement>(first: Size) {
       const width = Math.floor(entry.contentRect.width)
       const height = Math.floor(entry.contentRect.height)
       if (width === 0 || height === 0) return
+      setMeasured(true)
       setSize((before) =>
         before.width === width && before.height === height ? before : { width, height },
       )
@@ -20,5 +22,5 @@ export function useSize<Kind extends HTMLElement>(first: Size) {
     observer.observe(element)
     return () => observer.disconnect()
   }, [])
-  return { ref, size }
+  return { ref, size, measured }
 }

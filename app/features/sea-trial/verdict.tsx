@@ -1,20 +1,22 @@
 import type { Run } from '~/drawing/types'
-import type { Refusals } from './wording'
+import type { Units } from '~/features/units/units'
+import { type Refusals, reasonInWords } from './wording'
 
 interface Props {
   run: Run
+  units: Units
   refusals: Refusals
   fault: string | null
 }
 
 /** What became of the run, in the largest type of the page, and why. */
-export function Verdict({ run, refusals, fault }: Props) {
+export function Verdict({ run, units, refusals, fault }: Props) {
   const { text, reason } = run.result.verdict
   const refused = Object.values(refusals)
   return (
     <div role="status">
       <p className="text-title font-strong text-balance lg:text-verdict">{text}</p>
-      <p className="mt-1 max-w-measure text-note text-ink-soft">{reason}</p>
+      <p className="mt-1 max-w-measure text-note text-ink-soft">{reasonInWords(reason, units)}</p>
       {refused.length > 0 && (
         <div className="mt-2 border-l-2 border-ink pl-3 text-note">
           <p className="font-strong">

@@ -15,12 +15,6 @@ export function courseInWords(angleDeg: number): string {
   return `${Math.round(Math.abs(angleDeg))}° ${side} tack`
 }
 
-/** "2:05". */
-export function clock(timeS: number): string {
-  const whole = Math.floor(timeS + 1e-6)
-  return `${Math.floor(whole / 60)}:${String(whole % 60).padStart(2, '0')}`
-}
-
 export const eventNames: Record<TrialEvent['kind'], string> = {
   gust: 'Gust',
   'wind-shift': 'Wind shift',
@@ -47,6 +41,13 @@ export function eventInWords(event: TrialEvent, plan: Plan, units: Units): strin
       return `${sail} reefed to ${100 - event.percent} %`
     }
   }
+}
+
+/** Why a run got its verdict; the model gives loads in newtons, the visitor reads his own unit. */
+export function reasonInWords(reason: string, units: Units): string {
+  return reason.replace(/(\d+(?:\.\d+)?) N\b/g, (_, newtons) =>
+    inWords(rounded('N', Number(newtons), units, 1)),
+  )
 }
 
 /** Refusals by parameter key, each naming the control and its range in the visitor's units. */

@@ -12,7 +12,7 @@ interface Props {
 /** The thin line at the head of every page: where one is, and which setup is in hand. */
 export function Masthead({ query = '', children }: Props) {
   return (
-    <header className="border-b border-hair text-note">
+    <header className="relative border-b border-hair text-note">
       <div className="flex flex-wrap items-center gap-x-3 px-4 md:gap-x-6 md:px-margin">
         <Link to="/" className="flex h-touch items-center font-strong">
           Counterhelm
@@ -46,11 +46,13 @@ export function Masthead({ query = '', children }: Props) {
 
 function Folded({ title, children }: { title: string; children: ReactNode }) {
   return (
-    <details className="ml-auto open:order-last open:basis-full open:pb-3">
+    <details className="ml-auto">
       <summary className="flex h-touch cursor-pointer list-none items-center underline underline-offset-4 [&::-webkit-details-marker]:hidden">
         {title}
       </summary>
-      {children}
+      <div className="absolute inset-x-0 top-full z-30 border-b border-ink bg-paper px-4 py-3 md:px-margin">
+        {children}
+      </div>
     </details>
   )
 }

@@ -1,8 +1,8 @@
 import { withValue } from 'sim/plan/keys'
 import { problemsOf } from 'sim/plan/problems'
 import { expect, test } from 'vitest'
+import { clock } from '~/drawing/clock'
 import {
-  clock,
   courseInWords,
   eventInWords,
   refusalsInWords,
