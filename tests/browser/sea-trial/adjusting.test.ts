@@ -8,6 +8,7 @@ describe('adjusting', () => {
   }) => {
     await open(page)
     const [value, metrics] = [await windBox(page).inputValue(), await metricsOf(page)]
+    const traces = await tracesOf(page)
     const box = await windRule(page).boundingBox()
     if (!box) throw new Error('the slider is not drawn')
     const y = box.y + box.height / 2
@@ -17,7 +18,6 @@ describe('adjusting', () => {
       await page.mouse.move(box.x + box.width * part, y)
       await page.waitForTimeout(40)
     }
-    const traces = await tracesOf(page)
     await expect.poll(() => metricsOf(page), { timeout: 10_000 }).not.toBe(metrics)
     expect(await tracesOf(page)).not.toBe(traces)
     await page.mouse.up()

@@ -19,7 +19,7 @@ export const clockOf = (page: Page) =>
 export const tracesOf = (page: Page) =>
   page
     .locator('.strip svg[role="img"] path')
-    .evaluateAll((paths) => paths.map((path) => path.getAttribute('d')).join('').length)
+    .evaluateAll((paths) => paths.map((path) => path.getAttribute('d')).join(''))
 export const windBox = (page: Page) => page.getByRole('textbox', { name: 'Wind strength' })
 export const windRule = (page: Page) => page.getByRole('slider', { name: 'Wind strength' })
 
