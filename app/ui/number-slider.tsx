@@ -65,8 +65,8 @@ export function NumberSlider(props: NumberSliderProps) {
   const describedBy = [hint && `${id}-hint`, problem && `${id}-problem`].filter(Boolean).join(' ')
   return (
     <div className="text-note">
-      <div className="flex items-end justify-between gap-3">
-        <label htmlFor={id} className={tight ? '-mt-2 pb-1.5' : 'pb-2'}>
+      <div className={`flex items-end justify-between gap-3 ${tight ? 'h-8' : ''}`}>
+        <label htmlFor={id} className={tight ? 'pb-1.5' : 'pb-2'}>
           {label}
         </label>
         <span className="flex shrink-0 items-baseline gap-1.5">

@@ -16,7 +16,7 @@ import { PlayBar } from './play-bar'
 import { Readings } from './readings'
 import { refusalsOf, requestOf } from './request'
 import { RunTools, StepTools } from './run-tools'
-import { AboutSetup, SetupPicker } from './setup-picker'
+import { AboutSetup, Flaw, SetupPicker } from './setup-picker'
 import { resultOf, type Sketch } from './sketch'
 import type { TrialState } from './state'
 import { TimeStrip } from './time-strip'
@@ -73,6 +73,7 @@ export function SeaTrial(opening: Props) {
   const { ref: titleRef, inView } = useInView<HTMLDivElement>()
 
   const { plan } = request
+  const entry = entries.find(({ id }) => id === state.setupId)
   const adjusting = useMemo(
     () => ({ kept, plan, units, refusals, dispatch }),
     [kept, plan, units, refusals, dispatch],
@@ -117,12 +118,13 @@ export function SeaTrial(opening: Props) {
             a run computed by the server. Playing and adjusting need JavaScript.
           </p>
         </noscript>
-        <div className="trial-sheet px-4 pt-2 md:px-margin">
+        <div className="trial-sheet px-4 pt-2 md:px-margin md:pt-4">
           <Weather />
           <Drawings run={run} ghosts={ghosts} playback={playback} measures={measures} />
-          <AboutSetup entries={entries} setupId={state.setupId} />
+          <AboutSetup entry={entry} />
           <div ref={titleRef} className="verdict">
             <Verdict run={run} units={units} refusals={refusals} fault={fault} />
+            <Flaw entry={entry} className="max-xl:hidden" />
           </div>
           <div className="strip flex min-w-0 flex-col">
             <TimeStrip

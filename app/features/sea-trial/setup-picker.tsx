@@ -75,18 +75,23 @@ export function SetupPicker({ entries, setupId, units, onChoose }: Props) {
 }
 
 /** What the setup in hand is, as a note on the sheet. */
-export function AboutSetup({ entries, setupId }: Pick<Props, 'entries' | 'setupId'>) {
-  const chosen = entries.find((entry) => entry.id === setupId)
-  if (!chosen) return null
+export function AboutSetup({ entry }: { entry: SetupEntry | undefined }) {
+  if (!entry) return null
   return (
     <div className="about max-w-measure text-note text-ink-soft">
-      <p>{chosen.summary}</p>
-      {chosen.flaw && (
-        <p className="mt-1 border-l-2 border-ink pl-2 text-ink">
-          Wrong on purpose: {chosen.flaw.text}
-        </p>
-      )}
+      <p>{entry.summary}</p>
+      <Flaw entry={entry} className="xl:hidden" />
     </div>
+  )
+}
+
+/** What is wrong on purpose with a setup; beside the verdict where the sheet's corner is too small. */
+export function Flaw({ entry, className }: { entry: SetupEntry | undefined; className: string }) {
+  if (!entry?.flaw) return null
+  return (
+    <p className={`mt-2 border-l-2 border-ink pl-3 text-note text-ink ${className}`}>
+      Wrong on purpose: {entry.flaw.text}
+    </p>
   )
 }
 

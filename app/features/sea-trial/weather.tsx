@@ -29,14 +29,14 @@ export function Weather() {
       </button>
       <div
         id="weather"
-        className={`grid items-end gap-x-6 gap-y-1 md:grid-cols-3 xl:grid-cols-[repeat(5,minmax(0,1fr))_5rem] ${unfolded ? '' : 'max-md:hidden'}`}
+        className={`grid items-start gap-x-6 gap-y-1 md:max-xl:mt-2 md:grid-cols-3 xl:grid-cols-[repeat(5,minmax(0,1fr))_5rem] ${unfolded ? '' : 'max-md:hidden'}`}
       >
         {weatherKeys.map((key) => (
           <ParameterField key={key} name={key} brief />
         ))}
         <Button
           weight="word"
-          className="justify-self-start text-left"
+          className="mt-4 justify-self-start text-left"
           aria-expanded={further}
           onClick={() => setFurther(!further)}
         >
