@@ -105,3 +105,45 @@ describe('path of the deflected part', () => {
     expect(solver.hitchOut).toBeCloseTo(out, 6)
   })
 })
+
+describe('the line from a hitch to the tiller', () => {
+  const [sail] = vesselOf(plainPlan).sails
+  const rigged = controlLineOf(plainPlan, sail, 1)
+  const atRest = sail?.heldAt ?? 0
+
+  test('stretches by its tension over its stiffness, which the hitch gives up', () => {
+    for (const stiffness of [3e3, 2e4, 2e5]) {
+      for (const takeUp of [0.05, 0.2, 0.4]) {
+        for (const sheet of [20, 150, 900]) {
+          const solver = createLineSolver({ ...rigged, stiffness, takeUp })
+          const tension = solver.tension(atRest, 0, sheet, 0)
+          expect(tension).toBeGreaterThan(0)
+          expect(takeUp - solver.hitchOut).toBeCloseTo(tension / stiffness, 6)
+        }
+      }
+    }
+  })
+
+  test('pulls harder the more it is taken up and the harder the sheet pulls', () => {
+    const pull = (takeUp: number, sheet: number) =>
+      createLineSolver({ ...rigged, takeUp }).tension(atRest, 0, sheet, 0)
+    for (let takeUp = 0.05; takeUp < 0.5; takeUp += 0.05) {
+      expect(pull(takeUp + 0.05, 200)).toBeGreaterThan(pull(takeUp, 200))
+      expect(pull(takeUp, 210)).toBeGreaterThan(pull(takeUp, 200))
+    }
+  })
+
+  test('goes slack when it is eased, and never pushes', () => {
+    const solver = createLineSolver({ ...rigged, takeUp: -0.1 })
+    expect(solver.tension(atRest, 0, 300, 0)).toBe(0)
+    expect(solver.hitchOut).toBe(0)
+  })
+
+  test('loses in its leads what friction takes, in the direction it runs', () => {
+    // Eytelwein, e^(mu theta) for each lead.
+    const tail = createLineSolver({ ...rigged, tail: true, exponent: 0.12 })
+    expect(tail.tension(atRest, 0, 200, 1)).toBeCloseTo(200 * Math.exp(-0.12), 9)
+    expect(tail.tension(atRest, 0, 200, 0)).toBeCloseTo(200, 9)
+    expect(tail.tension(atRest, 0, 200, -1)).toBeCloseTo(200 * Math.exp(0.12), 9)
+  })
+})

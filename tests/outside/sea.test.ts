@@ -111,6 +111,40 @@ describe('water in a wave', () => {
     expect(slope / (0.5 * k)).toBeCloseTo(1, 1)
   })
 
+  test.each([2, 3.5, 6])(
+    'pushes and turns the hull as its strips together in a %d s wave',
+    (wavePeriod) => {
+      // Salvesen, Tuck & Faltinsen 1970 in its long-wave form: each strip, of a share 3/4 (1 - s^2) of the lateral mass, goes
+      // with the water. Summed here strip by strip; the model uses the closed form.
+      const vessel = vesselOf(plainPlan)
+      const loads = createWaveLoads(single(wavePeriod, 0.3), vessel)
+      const omega = (2 * Math.PI) / wavePeriod
+      const k = (omega * omega) / GRAVITY
+      const acceleration = 0.3 * omega * omega * Math.exp((-k * vessel.draught) / 2)
+      const whole = vessel.swayMass * acceleration
+      for (const degrees of [20, 45, 80, 130, -70]) {
+        // Heading that puts the wave, which runs north, this far off the bow; x forward, sway to starboard.
+        const cosine = Math.cos(degrees * DEGREE)
+        const sine = Math.sin(degrees * DEGREE)
+        for (const t of [0.3, 1.1]) {
+          loads.update(0, 0, cosine, sine, t, 1)
+          let sway = 0
+          let yaw = 0
+          const strips = 2000
+          for (let i = 0; i < strips; i++) {
+            const share = (2 * (i + 0.5)) / strips - 1
+            const x = (share * vessel.length) / 2
+            const push = -sine * Math.sin(k * x * cosine - omega * t) * 0.75 * (1 - share * share)
+            sway += (push * whole * 2) / strips
+            yaw += (x * push * whole * 2) / strips
+          }
+          expect(Math.abs(loads.sway - sway)).toBeLessThan(2e-4 * whole)
+          expect(Math.abs(loads.yaw - yaw)).toBeLessThan((2e-4 * whole * vessel.length) / 2)
+        }
+      }
+    },
+  )
+
   test('lets a beam sea yaw a symmetric hull not at all, and a quartering one most', () => {
     const loads = createWaveLoads(single(3.5, 0.3), vesselOf(plainPlan))
     const most = (degrees: number) => {
