@@ -171,7 +171,7 @@ export const hullParameters = {
     max: 0.05,
     step: 0.001,
     default: 0.012,
-    source: 'Estimate: resistance of the heeled hull acts to leeward of the keel line',
+    source: 'Estimate: the heeled waterline is fuller to leeward and turns her to windward',
     effect: 'More weather helm with heel',
   }),
 } as const
