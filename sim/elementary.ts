@@ -100,6 +100,7 @@ export function atan2(y: number, x: number): number {
   return y < 0 ? -angle : angle
 }
 
+/** Length of a vector of two or three components. */
 export function hypot(x: number, y: number, z = 0): number {
   return Math.sqrt(x * x + y * y + z * z)
 }

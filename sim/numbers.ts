@@ -6,6 +6,7 @@ export function smoothStep(from: number, to: number, x: number): number {
   return s * s * (3 - 2 * s)
 }
 
+/** The number nearest to x between two bounds. */
 export function clamp(x: number, low: number, high: number): number {
   return x < low ? low : Math.min(x, high)
 }

@@ -20,6 +20,7 @@ const RESIDUARY = [
   0, 0.05, 0.115, 0.275, 0.475, 0.791, 1.2, 1.855, 2.665, 3.847, 5.38, 8.12, 13.3, 22.018, 35.1,
   52.112, 72, 90, 118, 138, 165, 210,
 ]
+/** Where the table ends; faster than that the last value holds. */
 export const HIGHEST_FROUDE = 0.9
 
 /** Residuary resistance per unit weight of an average hull at a Froude number on the waterline length. */

@@ -20,6 +20,7 @@ export type StoredUnit =
   | '%'
   | '1'
 
+/** A number with a unit and a range, both ends allowed. */
 export interface Quantity {
   readonly type: 'quantity'
   /** The sailor's words for it. */
@@ -39,6 +40,7 @@ export interface Quantity {
   readonly effect?: string
 }
 
+/** One of a few options, by key, each with a sailor's words. */
 export interface Choice<Option extends string = string> {
   readonly type: 'choice'
   readonly label: string
@@ -48,8 +50,10 @@ export interface Choice<Option extends string = string> {
   readonly effect?: string
 }
 
+/** One entry of a table. */
 export type Parameter = Quantity | Choice
 
+/** Parameters by their keys. */
 export type ParameterTable = Readonly<Record<string, Parameter>>
 
 /** The values a table describes: numbers for quantities, one of the options for choices. */
@@ -57,10 +61,12 @@ export type ValuesOf<Table extends ParameterTable> = {
   -readonly [Key in keyof Table]: Table[Key] extends Choice<infer Option> ? Option : number
 }
 
+/** An entry for a number. */
 export function quantity(definition: Omit<Quantity, 'type'>): Quantity {
   return { type: 'quantity', ...definition }
 }
 
+/** An entry for a choice; its type knows the options. */
 export function choice<Option extends string>(
   definition: Omit<Choice<Option>, 'type'>,
 ): Choice<Option> {

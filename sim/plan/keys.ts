@@ -14,6 +14,7 @@ import { sailParameters, trimParameters } from '../parameters/sails'
 import { elasticParameters, leadParameters, lineParameters } from '../parameters/steering'
 import type { Plan } from './types'
 
+/** A parameter's value in its stored unit, or the key of an option. */
 export type Value = number | string
 
 type Owner = 'boat' | 'setup'

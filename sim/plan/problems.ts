@@ -3,6 +3,7 @@ import { cos, hypot, sin } from '../elementary'
 import { checkValue, keysOf, parameterAt, readValue } from './keys'
 import type { Plan } from './types'
 
+/** One refusal: the key, the value given, and in words with the allowed range where there is one. */
 export interface Problem {
   key: string
   given: unknown

@@ -54,10 +54,12 @@ const hardwareSchema = z.strictObject({
   z: z.number().min(0).max(4),
 })
 
+/** Conditions, leads and trims: every key of their tables, nothing else, each in its range. */
 export const conditionsSchema = valuesSchema(conditionParameters)
 export const leadSchema = valuesSchema(leadParameters)
 export const trimSchema = valuesSchema(trimParameters)
 
+/** A boat; values are refused by key with the allowed range. Whether they fit together is for `problemsOf`. */
 export const boatSchema = z.strictObject({
   id: slug,
   name: title,
@@ -76,6 +78,7 @@ export const boatSchema = z.strictObject({
   provenance: z.record(z.string().max(80), z.string().max(400)),
 })
 
+/** A setup, refused in the same way. */
 export const setupSchema = z.strictObject({
   id: slug,
   name: title,
@@ -95,6 +98,7 @@ export const setupSchema = z.strictObject({
 const atS = z.number().min(0).max(3600)
 const durationS = z.number().min(1).max(600)
 
+/** An event of a run; times in seconds from its start. */
 export const trialEventSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     atS,

@@ -11,6 +11,7 @@ import type { elasticParameters, leadParameters, lineParameters } from '../param
 
 /** Values in the stored units of their parameter tables; layouts are drawn for the starboard tack. */
 
+/** A fitting on deck, m: x forward from the rudder stock, y to starboard, z above the waterline. */
 export interface HardwarePoint {
   readonly name: string
   readonly kind: 'block' | 'cleat' | 'padeye' | 'stanchion' | 'winch' | 'toe-rail'
@@ -19,8 +20,10 @@ export interface HardwarePoint {
   readonly z: number
 }
 
+/** Geometry of one sail, and its name. */
 export type Sail = ValuesOf<typeof sailParameters> & { name: string }
 
+/** A boat as a document; `sails` by their ids, which trims and setups name. */
 export interface Boat {
   id: string
   name: string
@@ -36,15 +39,20 @@ export interface Boat {
   provenance: Record<string, string>
 }
 
+/** How one sail is set and sheeted. */
 export type Trim = ValuesOf<typeof trimParameters>
+/** One lead of the control line. */
 export type Lead = ValuesOf<typeof leadParameters>
+/** Wind, sea, course asked and seed. */
 export type Conditions = ValuesOf<typeof conditionParameters>
 
+/** What is wrong with a setup on purpose, in a code and in words. */
 export interface Flaw {
   code: string
   text: string
 }
 
+/** How a boat is rigged and trimmed, and the conditions it is meant for; leads in order from the sheet to the tiller. */
 export interface Setup {
   id: string
   name: string
@@ -67,8 +75,10 @@ export interface Plan {
   setup: Setup
 }
 
+/** What holds the tiller: line and elastic, a lashing at the balance, or nothing. */
 export type Helm = 'sheet-to-tiller' | 'lashed' | 'free'
 
+/** What is dropped into a run at a moment; angles in degrees clockwise, a negative gust is a lull, heights and reefs add to what is there. */
 export type TrialEvent =
   | { atS: number; kind: 'gust'; strengthKn: number; durationS: number }
   | { atS: number; kind: 'wind-shift'; angleDeg: number; durationS: number }

@@ -7,6 +7,7 @@ const SHEAVE_LOSS = { ball: 0.02, plain: 0.08 } as const
 /** Friction of polyester line on a smooth fairlead and on bare wood or gelcoat; usual range .1 to .3, from memory. */
 const RUBBING = { fairlead: 0.14, rub: 0.25 } as const
 
+/** Kinds of lead: two sheaves, two things to rub on. */
 export type LeadKind = keyof typeof SHEAVE_LOSS | keyof typeof RUBBING
 
 /** Capstan ratio of tensions e^(mu theta); Eytelwein. */

@@ -10,6 +10,7 @@ const ROPE = {
   hmpe: { breaking: 420, stretch: 0.007 },
 } as const
 
+/** What a line bears and how much it gives. */
 export interface RopeStrength {
   /** N */
   breakingLoad: number

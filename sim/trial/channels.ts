@@ -27,6 +27,7 @@ export const channels = {
   waveM: { label: 'Water surface at the boat', unit: 'm' },
 } as const
 
+/** Name of a recorded quantity. */
 export type Channel = keyof typeof channels
 
 /** Column of values per channel, all of the same length. */

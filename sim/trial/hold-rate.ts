@@ -1,6 +1,7 @@
 import { runHolds } from './run'
 import type { TrialRequest } from './types'
 
+/** Runs that held, of how many. */
 export interface HoldRate {
   held: number
   of: number

@@ -1,8 +1,10 @@
 import type { Conditions, Helm, Plan, TrialEvent } from '../plan/types'
 import type { Series } from './channels'
 
+/** Fixed-step Runge-Kutta, or extrapolation with step control as reference. */
 export type Solver = 'fixed-step' | 'adaptive'
 
+/** All that a run depends on. `conditions` count in place of the setup's own; seconds throughout. */
 export interface TrialRequest {
   plan: Plan
   conditions: Conditions
@@ -31,6 +33,7 @@ export interface Happening {
   text: string
 }
 
+/** Headline figures; the judged ones after the unjudged beginning, angles in degrees, positive over the starboard side. */
 export interface Metrics {
   holds: boolean
   /** Until she tacked, gybed, broached or was knocked flat, or the whole run. */
@@ -47,6 +50,7 @@ export interface Metrics {
   peakSheetN: number
 }
 
+/** What became of her, for programs; `Verdict.text` says it to people. */
 export type VerdictCode =
   | 'holds'
   | 'holds-other-course'
@@ -60,6 +64,7 @@ export type VerdictCode =
   | 'too-slow'
   | 'stopped'
 
+/** How the run went. */
 export interface Verdict {
   code: VerdictCode
   /** One sentence in a sailor's words. */
@@ -85,6 +90,7 @@ export interface BalanceSummary {
   rudderMomentNm: number
 }
 
+/** A run as it is shown, exported and compared. */
 export interface TrialResult {
   modelVersion: string
   verdict: Verdict

@@ -31,6 +31,7 @@ const TELL_MOST = 8
 /** Slackness shorter than this is not told, s. */
 const SLACK_TIME = 1
 
+/** What has been seen of a run so far; angles in rad, loads in N, speed in knots. */
 export interface Watch {
   /** Course to the wind against its one-minute mean direction, rad, positive over the starboard side. */
   courseToWind: number

@@ -1,5 +1,6 @@
 import { atan2, cos, hypot, sin } from '../elementary'
 
+/** Wind as the boat feels it. */
 export interface ApparentWind {
   /** Same unit as the speeds given. */
   speed: number

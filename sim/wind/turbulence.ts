@@ -32,6 +32,7 @@ export function kaimal(frequency: number, speed: number, sigma: number, scale: n
   return (4 * sigma * sigma * time) / power(1 + 6 * frequency * time, 5 / 3)
 }
 
+/** One record, sampled. */
 export interface Turbulence {
   /** Departures from the mean along and across it, m/s, every TURBULENCE_STEP seconds from t = -TURBULENCE_STEP. */
   along: Float64Array
