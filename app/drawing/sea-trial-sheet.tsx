@@ -147,6 +147,9 @@ function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) 
   const { plan } = run.request
   const rig = rigGeometry(plan, moment)
   const paper = (point: { x: number; y: number }) => onPaper(point, scale)
+  const source = shapes.find(({ id }) => id === plan.setup.source)?.shape
+  // The model leaves the sheet of a part-rolled headsail where the whole sail's is.
+  const clew = source && !source.boom ? source.clew : undefined
   const masts = Object.values(plan.boat.sails).filter(
     ({ kind }) => kind === 'main' || kind === 'mizzen',
   )
@@ -174,7 +177,7 @@ function Rigging(props: SeaTrialSheetProps & { scale: number; shapes: Shapes }) 
         <>
           <Sheet
             deck={paper(rig.sheetDeck)}
-            boom={paper(rig.sheetBoom)}
+            boom={paper(clew ?? rig.sheetBoom)}
             hitch={plan.setup.line.pull === 'deflected' ? paper(rig.hitch) : undefined}
             tensionN={moment.sheetN}
             slack={moment.sheetN < 2}
