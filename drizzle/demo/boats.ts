@@ -102,13 +102,13 @@ const longKeel28: Boat = {
     steering: sailOf('Steering sail', {
       kind: 'steering',
       area: 1.6,
-      luffX: -0.35,
+      luffX: -0.05,
       footZ: 1.5,
       luffLength: 2.4,
       footLength: 1.2,
       camber: 0.06,
-      sheetReach: 1.1,
-      sheetX: -0.35,
+      sheetReach: 0.8,
+      sheetX: -0.7,
       sheetY: 0,
       sheetZ: 1,
       sheetParts: 1,
@@ -134,7 +134,7 @@ const longKeel28: Boat = {
 
 const finSkeg31: Boat = {
   id: 'fin-skeg-31',
-  name: 'Corran Light',
+  name: 'Brackmere',
   type: 'Fin keel and skeg 31 ft sloop',
   summary: 'A moderate cruiser: quicker on the helm, wider aft, her rudder on a skeg.',
   hull: {
@@ -214,13 +214,13 @@ const finSkeg31: Boat = {
     steering: sailOf('Steering sail', {
       kind: 'steering',
       area: 1.8,
-      luffX: -0.5,
+      luffX: -0.05,
       footZ: 1.6,
       luffLength: 2.6,
       footLength: 1.25,
       camber: 0.06,
-      sheetReach: 1.15,
-      sheetX: -0.5,
+      sheetReach: 0.85,
+      sheetX: -0.7,
       sheetY: 0,
       sheetZ: 1.1,
       sheetParts: 1,
@@ -245,7 +245,7 @@ const finSkeg31: Boat = {
 
 const liftingKeel22: Boat = {
   id: 'lifting-keel-22',
-  name: 'Sandhopper',
+  name: 'Pellinote',
   type: 'Light 22 ft sloop, lifting keel',
   summary: 'Light and lively, a lifting keel and an outboard rudder on the transom.',
   hull: {
@@ -325,13 +325,13 @@ const liftingKeel22: Boat = {
     steering: sailOf('Steering sail', {
       kind: 'steering',
       area: 1,
-      luffX: -0.25,
+      luffX: 0.3,
       footZ: 1.3,
       luffLength: 1.9,
       footLength: 0.95,
       camber: 0.06,
-      sheetReach: 0.85,
-      sheetX: -0.25,
+      sheetReach: 0.65,
+      sheetX: -0.3,
       sheetY: 0,
       sheetZ: 0.9,
       sheetParts: 1,
@@ -355,7 +355,7 @@ const liftingKeel22: Boat = {
 
 const ketch38: Boat = {
   id: 'ketch-38',
-  name: 'Anna Thorne',
+  name: 'Farrowtide',
   type: 'Heavy 38 ft ketch with a tiller',
   summary: 'Heavy displacement, divided rig, a long tiller and loads to match.',
   hull: {

@@ -31,8 +31,8 @@ export interface ControlLine {
   /** Distance from the undeflected hitch to the first lead, and from the last lead to the tiller, as rigged. */
   hitchToLeadAtRest: number
   leadToTillerAtRest: number
-  /** Part length as rigged with the hitch pulled out by takeUp, less the straight part. */
-  pathExtraAtRest: number
+  /** Boom angle as trimmed, rad. */
+  boomAtRest: number
   /** Axial stiffness, N/m. */
   stiffness: number
   /** Sum of the leads' friction exponents. */
@@ -144,7 +144,7 @@ export function controlLineOf(
     takeUp: line.takeUp,
     hitchToLeadAtRest: hitchToLead,
     leadToTillerAtRest: distance(last, tiller),
-    pathExtraAtRest: tail ? 0 : distance(block, pulled) + distance(pulled, boom) - part,
+    boomAtRest: source?.heldAt ?? 0,
     stiffness: ropeStrength(line.diameterMm, line.material).axialStiffness / Math.max(length, 0.2),
     exponent,
     turning,

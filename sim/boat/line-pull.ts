@@ -19,6 +19,8 @@ export interface LineSolver {
 }
 
 const ITERATIONS = 5
+/** Rows of the table of sheet taken over the way of the hitch. */
+const TAKEN_ROWS = 96
 
 /** Undeflected hitch for one boom angle: ways to the held and the live end, unit way and distance to the first lead. */
 function createHitch() {
@@ -116,6 +118,27 @@ export function createLineSolver(line: ControlLine): LineSolver {
     return before
   }
 
+  // Work of the pull is work of the sheet: the sheet taken is the integral of F/T over the way of the hitch,
+  // at the boom's angle as trimmed.
+  place(line.boomAtRest)
+  const farthest = 0.97 * hitch.toLead
+  const integral = new Float64Array(line.tail ? 1 : TAKEN_ROWS + 1)
+  for (let i = 1; i < integral.length; i++) {
+    const low = ((i - 1) * farthest) / TAKEN_ROWS
+    const high = (i * farthest) / TAKEN_ROWS
+    const sum = ratioAt(low) + 4 * ratioAt((low + high) / 2) + ratioAt(high)
+    integral[i] = (integral[i - 1] as number) + (sum * (high - low)) / 6
+  }
+
+  /** Sheet drawn out of the part by a hitch pulled out so far, m. */
+  function taken(out: number): number {
+    const place = (Math.min(out, farthest) / farthest) * TAKEN_ROWS
+    const row = Math.min(Math.floor(place), TAKEN_ROWS - 1)
+    const low = integral[row] as number
+    return low + (place - row) * ((integral[row + 1] as number) - low)
+  }
+  const takenAtRest = line.tail ? 0 : taken(Math.max(line.takeUp, 0))
+
   const solver: LineSolver = {
     hitchOut: 0,
     tension(boom, delta, sheet, friction) {
@@ -133,14 +156,7 @@ export function createLineSolver(line: ControlLine): LineSolver {
         return (tillerGiven(delta) - line.takeUp + sheet / line.stiffness) / line.parts
       }
       const out = solve(boom, delta, sheet, 1)
-      const x = out * hitch.pullX
-      const y = out * hitch.pullY
-      const z = out * hitch.pullZ
-      const held = hypot(hitch.heldX - x, hitch.heldY - y, hitch.heldZ - z)
-      const live = hypot(hitch.liveX - x, hitch.liveY - y, hitch.liveZ - z)
-      const straight =
-        hypot(hitch.heldX, hitch.heldY, hitch.heldZ) + hypot(hitch.liveX, hitch.liveY, hitch.liveZ)
-      return -(held + live - straight - line.pathExtraAtRest) / line.parts
+      return (takenAtRest - taken(out)) / line.parts
     },
   }
   return solver

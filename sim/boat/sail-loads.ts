@@ -1,6 +1,6 @@
 import { RHO_AIR } from '../constants'
 import { atan2, cos, sin } from '../elementary'
-import { wrapAngle } from '../numbers'
+import { smoothStep, wrapAngle } from '../numbers'
 import type { TrialEvent } from '../plan/types'
 import { boomTarget } from '../sails/boom'
 import { fullness, sailCentre, sailDrag, sailLift } from '../sails/coefficients'
@@ -8,18 +8,26 @@ import { shiftShape } from '../wind/gust'
 import type { LineSolver } from './line-pull'
 import { BOOM, HEEL, ROLL_RATE, RUDDER, SURGE, SWAY, YAW_RATE } from './state'
 import type { Vessel } from './vessel'
-import { effortHeight, reefedArea } from './vessel-sail'
 
 /** Lag of a boom behind where the wind carries it, s. */
 const BOOM_LAG = 0.35
 /** No boom goes further out than its shrouds let it, rad. */
 const SHROUDS = 1.6
+/** Over this much short of its sheet, rad, a boom takes up the sheet's whole load. */
+const TAUT_FROM = 0.1
+const TAUT_AT = 0.02
+/** Boom angle, rad, over which a boom changes sides. */
+const SIDE_SOFTNESS = 0.01
+/** Below this limit, rad, a boom hauled amidships is held both ways. */
+const AMIDSHIPS = 0.06
 /** Time a crew needs to take in a reef, s. */
 const REEFING_TIME = 25
 /** Apparent wind angles, rad, over which the lee of a squared-off main closes on a headsail, and how much wind it takes. */
 const LEE_BEGINS = 2.3
 const LEE_FULL = 2.9
 const LEE_LOSS = 0.65
+/** Clew angle, rad, over which a headsail passes from one side of the boat to the other. */
+const SIDE_BAND = 0.1
 
 export interface SailLoads {
   /** Body axes about the centre of gravity, N and N m; the moment in roll about the waterline. */
@@ -58,18 +66,25 @@ export function createSailLoads(
   const mainIndex = sails.findIndex((sail) => sail.kind === 'main')
   const first = Math.max(mainIndex, 0)
 
+  const left = new Float64Array(count)
+
+  /** Each reef takes its part of what stands then; a crew works at one sail after another. */
   function applyReefs(t: number): void {
+    left.fill(1)
     for (let i = 0; i < reefs.length; i++) {
       const event = reefs[i] as (typeof reefs)[number]
-      const percent = event.percent * shiftShape(t - event.atS, REEFING_TIME)
+      const taken = (event.percent / 100) * shiftShape(t - event.atS, REEFING_TIME)
       for (let k = 0; k < count; k++) {
-        const sail = sails[k] as (typeof sails)[number]
-        if (sail.id !== event.sail) continue
-        const luff = (sail.effortHeight - sail.footZ) / effortHeight(0, 1, 0)
-        area[k] = reefedArea(sail.area, percent)
-        height[k] = effortHeight(sail.footZ, luff, percent)
-        chord[k] = sail.chord * Math.sqrt(1 - percent / 100)
+        if (sails[k]?.id === event.sail) left[k] = (left[k] as number) * (1 - taken)
       }
+    }
+    for (let k = 0; k < count; k++) {
+      const sail = sails[k] as (typeof sails)[number]
+      const share = left[k] as number
+      const shrink = Math.sqrt(share)
+      area[k] = sail.area * share
+      height[k] = sail.footZ + (sail.effortHeight - sail.footZ) * shrink
+      chord[k] = sail.chord * shrink
     }
   }
 
@@ -106,21 +121,24 @@ export function createSailLoads(
       let lee = 0
       if (mainIndex >= 0) {
         const aft = Math.abs(atan2(-relativeY, -relativeX))
-        lee = aft > LEE_BEGINS ? Math.min((aft - LEE_BEGINS) / (LEE_FULL - LEE_BEGINS), 1) : 0
+        lee = smoothStep(LEE_BEGINS, LEE_FULL, aft)
       }
       for (let k = 0; k < count; k++) {
         const sail = sails[k] as (typeof sails)[number]
         const boom = y[BOOM + k] as number
         const h = height[k] as number
         const ax = windX * sail.profile - u
-        const ay = (windY * sail.profile - v - r * sail.luffFromCentre - p * h) * cosPhi
+        // The mast's own swing is already square to it; only what is level is foreshortened by heel.
+        const ay = (windY * sail.profile - v - r * sail.luffFromCentre) * cosPhi - p * h
         const speed = Math.sqrt(ax * ax + ay * ay)
         const angle = atan2(-ay, -ax)
         const incidence = wrapAngle(angle + boom)
         let pressure = 0.5 * RHO_AIR * speed * speed * (area[k] as number)
         // Behind a squared-off main on the same side a headsail stands in its lee.
-        if (lee > 0 && sail.kind === 'headsail' && (y[BOOM + mainIndex] as number) * boom > 0) {
-          pressure *= 1 - LEE_LOSS * lee
+        if (lee > 0 && sail.kind === 'headsail') {
+          const main = y[BOOM + mainIndex] as number
+          const sameSide = smoothStep(-SIDE_BAND, SIDE_BAND, main < 0 ? -boom : boom)
+          pressure *= 1 - LEE_LOSS * lee * sameSide
         }
         const lift = sailLift(incidence, boom, sail.curve)
         const drag = sailDrag(incidence, lift, sail.curve)
@@ -140,19 +158,28 @@ export function createSailLoads(
         roll += forceH * h
         yaw += ceX * forceY - ceY * forceX
 
-        // Force across the chord, towards the side on which the boom lies under its sheet.
+        // Force across the chord, towards the side on which the boom lies.
         const normal = forceX * sinB + forceH * cosB
-        // Sheeted amidships it pulls on its sheet whichever way it is pressed.
-        const moment = (boom === 0 ? Math.abs(normal) : boom < 0 ? -normal : normal) * arm
-        const tension = moment > 0 ? moment * sail.tensionOverMoment : 0
         const pulls = k === vessel.source
         let goal = sail.heldAt
+        let moment = (sail.heldAt < 0 ? -normal : normal) * arm
         if (sail.hold === 'sheet') {
+          const side = boom / Math.sqrt(boom * boom + SIDE_SOFTNESS * SIDE_SOFTNESS)
+          const amidships = 1 - smoothStep(0, AMIDSHIPS, sail.limit)
+          const outward = amidships * Math.abs(normal) + (1 - amidships) * side * normal
+          const untaut = outward > 0 ? outward * arm * sail.tensionOverMoment : 0
           const eased =
-            pulls && pull ? pull.easedLength(boom, delta, tension) / (sail.reach * sail.across) : 0
+            pulls && pull ? pull.easedLength(boom, delta, untaut) / (sail.reach * sail.across) : 0
           const limit = sail.limit + eased
+          const out = boom < 0 ? -boom : boom
+          // A boom short of its sheet leaves it slack; one against the shrouds is held by them.
+          const taut =
+            smoothStep(limit - TAUT_FROM, limit - TAUT_AT, out) *
+            (1 - smoothStep(SHROUDS - TAUT_FROM, SHROUDS, limit))
+          moment = outward * arm * taut
           goal = boomTarget(angle, boom, limit > 0 ? Math.min(limit, SHROUDS) : 0)
         }
+        const tension = moment > 0 ? moment * sail.tensionOverMoment : 0
         dy[BOOM + k] = (goal - boom) / BOOM_LAG
         loads.sheet[k] = tension
         loads.drawing[k] = fullness(incidence)

@@ -1,4 +1,4 @@
-import { DEGREE } from '../constants'
+import { DEGREE, KNOT } from '../constants'
 import { sin } from '../elementary'
 import type { Plan } from '../plan/types'
 import { type SailCurve, sailCurve } from '../sails/coefficients'
@@ -11,9 +11,6 @@ const FORESTAY_RAKE = 0.31
 const EFFORT_HEIGHT = 0.39
 /** Chord on which the centre of pressure is placed, over the mean chord: the integral of c^2 over that of c, 4/3 for a triangle. */
 const MOMENT_CHORD = 4 / 3
-/** Wind at 10 m for which the profile's slope is taken, m/s; it varies little. */
-const PROFILE_WIND = 6
-
 export type SailHold = 'sheet' | 'fixed'
 
 /** One sail set, in SI and on the tack sailed. */
@@ -94,7 +91,7 @@ export function vesselSail(plan: Plan, id: string, tack: 1 | -1): VesselSail | u
     effortHeight: height,
     reach: sail.sheetReach,
     curve: sailCurve(sail.luffLength, sail.area, sail.camber),
-    profile: windProfile(height, PROFILE_WIND),
+    profile: windProfile(height, plan.setup.conditions.trueWindSpeedKn * KNOT),
     limit,
     hold: trim.held === 'sheet' ? 'sheet' : 'fixed',
     heldAt,

@@ -1,6 +1,6 @@
 import { DEGREE, GRAVITY } from '../constants'
-import { liftSlope, turnDamping } from '../foils/section'
-import { addedMass } from '../hull/added-mass'
+import { FOIL_DRAG, liftSlope, turnDamping } from '../foils/section'
+import { addedMass, keelAddedMass } from '../hull/added-mass'
 import { HIGHEST_FROUDE, hullResistance } from '../hull/resistance'
 import type { Plan } from '../plan/types'
 import { type ControlLine, controlLineOf } from './control-line'
@@ -16,6 +16,8 @@ export interface Vessel {
   mass: number
   surgeMass: number
   swayMass: number
+  /** Added mass of the keel alone, part of swayMass, kg. */
+  keelMass: number
   rollInertia: number
   yawInertia: number
   munkMass: number
@@ -31,6 +33,8 @@ export interface Vessel {
   keel: Foil & {
     /** Where its incidence is felt: three quarters of the chord, forward of the centre of gravity, m. */
     feltX: number
+    /** Section drag of the part that is only borrowed from the hull for its lift, on the area above. */
+    borrowedDrag: number
     /** Moment against turning over speed and yaw rate, kg m. */
     turnDamping: number
   }
@@ -75,11 +79,13 @@ export function vesselOf(plan: Plan): Vessel {
   const yawRadius = hull.yawRadiusRatio * hull.lengthOverall
   const yawOwn = mass * yawRadius * yawRadius
   const added = addedMass(hull.waterlineLength, hull.canoeBodyDraught, mass, rollOwn)
-  const rollInertia = rollOwn + added.roll
   const keelDepth = hull.canoeBodyDraught + keel.span
   const keelArea = (keel.area * keelDepth) / keel.span
   const keelChord = keel.area / keel.span
   const keelAspect = (2 * keelDepth * keelDepth) / keelArea
+  const keelMass = keelAddedMass(keelChord, keel.span)
+  const keelMiddle = hull.canoeBodyDraught + keel.span / 2
+  const rollInertia = rollOwn + added.roll + keelMass * keelMiddle * keelMiddle
   const keelSlope = liftSlope(keelAspect, keel.sweepDeg * DEGREE)
   const rudderAspect = (2 * rudder.span * rudder.span) / rudder.area
   // In a fixed order, so that sums come out the same to the last bit however the document was stored.
@@ -90,7 +96,8 @@ export function vesselOf(plan: Plan): Vessel {
     tack,
     mass,
     surgeMass: mass + added.surge,
-    swayMass: mass + added.sway,
+    swayMass: mass + added.sway + keelMass,
+    keelMass,
     rollInertia,
     yawInertia: yawOwn + added.yaw,
     munkMass: added.sway - added.surge,
@@ -109,6 +116,7 @@ export function vesselOf(plan: Plan): Vessel {
       area: keelArea,
       slope: keelSlope,
       feltX: keel.x - keelChord / 2 - hull.centreOfGravityX,
+      borrowedDrag: FOIL_DRAG * (1 - keel.area / keelArea),
       turnDamping: turnDamping(keelSlope, keelChord, keelDepth),
       aspect: keelAspect,
       x: keel.x - hull.centreOfGravityX,

@@ -42,12 +42,11 @@ export function createWaterLoads(vessel: Vessel, waves: WaveLoads): WaterLoads {
     stock: 0,
     update(y) {
       const phi = y[HEEL] as number
-      const v = y[SWAY] as number
       const p = y[ROLL_RATE] as number
       const r = y[YAW_RATE] as number
       const cosPhi = cos(phi)
       const ur = (y[SURGE] as number) - waves.orbitalX
-      const vr = v - waves.orbitalY
+      const vr = (y[SWAY] as number) - waves.orbitalY
 
       // Canoe body.
       const place = Math.min(Math.abs(ur), topSpeed) / vessel.speedStep
@@ -69,11 +68,11 @@ export function createWaterLoads(vessel: Vessel, waves: WaveLoads): WaterLoads {
       }
 
       // Keel.
-      const keelV = (vr + r * keel.feltX - p * keel.depth) * cosPhi
+      const keelV = (vr + r * keel.feltX) * cosPhi - p * keel.depth
       const keelAngle = atan2(keelV, ur)
       const keelQ = 0.5 * RHO_SEA * keel.area * (ur * ur + keelV * keelV)
       const keelLift = foilLift(keelAngle, keel.slope)
-      const keelDrag = foilDrag(keelAngle, keelLift, keel.aspect)
+      const keelDrag = foilDrag(keelAngle, keelLift, keel.aspect) - keel.borrowedDrag
       const keelCos = cos(keelAngle)
       const keelSin = sin(keelAngle)
       const keelForce = -keelQ * (keelLift * keelCos + keelDrag * keelSin)
@@ -83,9 +82,10 @@ export function createWaterLoads(vessel: Vessel, waves: WaveLoads): WaterLoads {
       roll -= keel.depth * keelForce
 
       // Rudder and skeg in the keel's wake; the skeg stands in the same water and does not turn.
-      const flowU = rudder.speedRatio * ur
-      const flowV =
-        (rudder.leewayRatio * v + r * rudder.x - p * rudder.depth - waves.rudderOrbitalY) * cosPhi
+      // The keel's downwash takes its share of what the keel feels, drift and waves alike.
+      const flowU = rudder.speedRatio * ((y[SURGE] as number) - waves.rudderOrbitalX)
+      const level = rudder.leewayRatio * vr + waves.orbitalY - waves.rudderOrbitalY + r * rudder.x
+      const flowV = level * cosPhi - p * rudder.depth
       const flow = Math.sqrt(flowU * flowU + flowV * flowV)
       const drift = atan2(flowV, flowU)
       const swing =

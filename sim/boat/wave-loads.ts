@@ -13,6 +13,7 @@ export interface WaveLoads {
   orbitalX: number
   orbitalY: number
   /** The same across the rudder. */
+  rudderOrbitalX: number
   rudderOrbitalY: number
   /** Surface height at the boat, m. */
   surface: number
@@ -37,6 +38,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
   const velocity = new Float64Array(count)
   const rudderVelocity = new Float64Array(count)
   const acceleration = new Float64Array(count)
+  const keelAcceleration = new Float64Array(count)
   const slope = new Float64Array(count)
   for (let i = 0; i < count; i++) {
     const ki = k[i] as number
@@ -45,9 +47,11 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
     velocity[i] = ai * wi * exp(-ki * vessel.keel.depth)
     rudderVelocity[i] = ai * wi * exp(-ki * vessel.rudder.depth)
     acceleration[i] = ai * wi * wi * exp((-ki * vessel.draught) / 2)
+    keelAcceleration[i] = ai * wi * wi * exp(-ki * vessel.keel.depth)
     slope[i] = ai * ki * exp((-ki * vessel.draught) / 2)
   }
-  const lateralMass = vessel.swayMass
+  // The keel's added mass sits amidships and deep: it is pushed, not turned.
+  const hullMass = vessel.swayMass - vessel.keelMass
   const table = hullTable(vessel.rudder.x / halfLength)
   const loads: WaveLoads = {
     surge: 0,
@@ -56,6 +60,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
     slope: 0,
     orbitalX: 0,
     orbitalY: 0,
+    rudderOrbitalX: 0,
     rudderOrbitalY: 0,
     surface: 0,
     update(north, east, cosPsi, sinPsi, t, gain) {
@@ -65,6 +70,7 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
       let tilt = 0
       let ox = 0
       let oy = 0
+      let rox = 0
       let roy = 0
       let surface = 0
       for (let i = 0; i < count; i++) {
@@ -93,21 +99,25 @@ export function createWaveLoads(sea: Seaway, vessel: Vessel): WaveLoads {
         const sinShift = side * between(table.sinShift, row, share)
         const a = acceleration[i] as number
         surge += a * cosMu * even * s
-        sway += a * sinMu * even * s
+        sway +=
+          (hullMass * a * even + vessel.keelMass * (keelAcceleration[i] as number)) * sinMu * s
         yaw += a * sinMu * odd * c
         tilt -= (slope[i] as number) * sinMu * even * s
         const w = (velocity[i] as number) * c
         ox += w * cosMu
         oy += w * sinMu
-        roy += (rudderVelocity[i] as number) * sinMu * (c * cosShift - s * sinShift)
+        const atRudder = (rudderVelocity[i] as number) * (c * cosShift - s * sinShift)
+        rox += atRudder * cosMu
+        roy += atRudder * sinMu
         surface += (sea.amplitude[i] as number) * c
       }
-      loads.surge = gain * vessel.mass * surge
-      loads.sway = gain * lateralMass * sway
-      loads.yaw = gain * lateralMass * halfLength * yaw
+      loads.surge = gain * vessel.surgeMass * surge
+      loads.sway = gain * sway
+      loads.yaw = gain * hullMass * halfLength * yaw
       loads.slope = gain * tilt
       loads.orbitalX = gain * ox
       loads.orbitalY = gain * oy
+      loads.rudderOrbitalX = gain * rox
       loads.rudderOrbitalY = gain * roy
       loads.surface = gain * surface
     },

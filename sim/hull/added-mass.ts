@@ -35,6 +35,19 @@ export function addedMass(
 }
 
 /**
+ * Added mass in sway of a keel under the hull, kg: a flat plate moving square to itself, rho pi/4 c^2 b, brought down
+ * for its short span, which the hull doubles.
+ *
+ * @param chord c, m
+ * @param span b, m
+ * @source plate strips with the aspect-ratio correction 1/sqrt(1 + (c/2b)^2); Brennen, added mass review 1982, from memory
+ */
+export function keelAddedMass(chord: number, span: number): number {
+  const slenderness = chord / (2 * span)
+  return ((Math.PI / 4) * RHO_SEA * chord * chord * span) / Math.sqrt(1 + slenderness * slenderness)
+}
+
+/**
  * Munk moment N = -(m22 - m11) u v, N m, which turns a drifting body across the stream.
  *
  * @source Munk 1924; Newman, Marine Hydrodynamics

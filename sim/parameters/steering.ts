@@ -27,8 +27,8 @@ export const lineParameters = {
     max: 1.8,
     step: 0.01,
     default: 0.3,
-    source: 'Hitch pulled out of straight with the tiller amidships',
-    effect: 'Taking up bears her away',
+    source: 'Hitch pulled out of straight, or tail hauled through, with the tiller amidships',
+    effect: 'Taking up a hitched line bears her away; hauling a tail through hardens its sail',
   }),
   tillerRadius: quantity({
     label: 'Line on the tiller, from the stock',

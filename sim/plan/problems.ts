@@ -1,7 +1,10 @@
 /** Refusals of a plan before a run starts: every value in its range, and what only several values together tell. */
+
+import { RHO_SEA } from '../constants'
 import { cos, hypot, sin } from '../elementary'
+import { sheetAcross } from '../sails/sheet'
 import { checkValue, keysOf, parameterAt, readValue } from './keys'
-import type { Plan } from './types'
+import type { Plan, Sail } from './types'
 
 /** One refusal: the key, the value given, and in words with the allowed range where there is one. */
 export interface Problem {
@@ -25,7 +28,9 @@ const LEAST_LENGTH = 0.03
 export function problemsOf(plan: Plan): Problem[] {
   const single = outOfRange(plan)
   // Geometry is only worth reading once each value by itself can be.
-  return single.length > 0 ? single : [...sailProblems(plan), ...lineProblems(plan)]
+  return single.length > 0
+    ? single
+    : [...hullProblems(plan), ...sailProblems(plan), ...lineProblems(plan)]
 }
 
 function outOfRange(plan: Plan): Problem[] {
@@ -39,6 +44,50 @@ function outOfRange(plan: Plan): Problem[] {
     const range =
       parameter.type === 'quantity' ? { min: parameter.min, max: parameter.max } : undefined
     problems.push({ key, given, message, ...range })
+  }
+  return problems
+}
+
+/** Closest angle to the wind that may be asked; no sail draws closer. */
+const CLOSEST_COURSE = 25
+/** Part of the box of waterline, beam and draught that a canoe body fills; usual hulls lie between .35 and .55. */
+const BLOCK = { min: 0.2, max: 0.75 }
+/** Largest strain of the elastic as rigged; its jacket locks near 1. */
+const MOST_STRAIN = 1.2
+/** Share of a sheet that must work across a boom eased right out, or it can hold nothing. */
+const LEAST_SHARE = 0.3
+
+function hullProblems({ boat, setup }: Plan): Problem[] {
+  const problems: Problem[] = []
+  const { hull } = boat
+  const course = setup.conditions.trueWindAngleDeg
+  if (Math.abs(course) < CLOSEST_COURSE) {
+    problems.push({
+      key: 'conditions.trueWindAngleDeg',
+      given: course,
+      message: `conditions.trueWindAngleDeg must be ${CLOSEST_COURSE} to 180 deg off the wind on either side: no sail draws closer`,
+    })
+  }
+  if (hull.waterlineLength > hull.lengthOverall) {
+    problems.push({
+      key: 'hull.waterlineLength',
+      given: hull.waterlineLength,
+      message: `hull.waterlineLength must be from 3.5 to ${hull.lengthOverall} m: the boat is no longer than that`,
+      min: 3.5,
+      max: hull.lengthOverall,
+    })
+  }
+  const box = RHO_SEA * hull.waterlineLength * hull.waterlineBeam * hull.canoeBodyDraught
+  const min = Math.ceil(BLOCK.min * box)
+  const max = Math.floor(BLOCK.max * box)
+  if (hull.displacement < min || hull.displacement > max) {
+    problems.push({
+      key: 'hull.displacement',
+      given: hull.displacement,
+      message: `hull.displacement must be from ${min} to ${max} kg for this waterline, beam and draught`,
+      min,
+      max,
+    })
   }
   return problems
 }
@@ -57,6 +106,34 @@ function sailProblems({ boat, setup }: Plan): Problem[] {
       problems.push({ key: `trim.${id}`, given: id, message: `the boat has no sail called ${id}` })
     }
   }
+  for (const [id, sail] of Object.entries(boat.sails)) {
+    const longest = round(1.05 * sail.footLength)
+    if (sail.sheetReach > longest) {
+      problems.push({
+        key: `sails.${id}.sheetReach`,
+        given: sail.sheetReach,
+        message: `sails.${id}.sheetReach must be from 0.2 to ${longest} m: the foot is no longer`,
+        min: 0.2,
+        max: longest,
+      })
+    }
+    const trim = setup.trim[id]
+    if (trim?.set !== 'yes') continue
+    if (sail.kind !== 'headsail' && (trim.held === 'pole' || trim.held === 'backed')) {
+      problems.push({
+        key: `trim.${id}.held`,
+        given: trim.held,
+        message: `trim.${id}.held must be sheet or preventer: only a headsail is held to windward`,
+      })
+    }
+    if (sail.kind !== 'headsail' && shareEasedOut(sail) < LEAST_SHARE) {
+      problems.push({
+        key: `sails.${id}.sheetX`,
+        given: sail.sheetX,
+        message: `sails.${id}.sheetX must lie clear of the boom's pivot: led from there the sheet pulls along the boom and cannot hold it`,
+      })
+    }
+  }
   const set = Object.keys(boat.sails).filter((id) => setup.trim[id]?.set === 'yes')
   if (set.length === 0) {
     problems.push({ key: 'trim', given: 'none', message: 'at least one sail must be set' })
@@ -71,6 +148,20 @@ function sailProblems({ boat, setup }: Plan): Problem[] {
   return problems
 }
 
+/** Share of a sheet across a boom eased to 60 degrees. */
+function shareEasedOut(sail: Sail): number {
+  const eased = -Math.PI / 3
+  return sheetAcross(
+    sail.luffX,
+    sail.sheetReach,
+    sail.footZ,
+    eased,
+    sail.sheetX,
+    -sail.sheetY,
+    sail.sheetZ,
+  )
+}
+
 function lineProblems(plan: Plan): Problem[] {
   const { boat, setup } = plan
   const { line, elastic } = setup
@@ -82,6 +173,18 @@ function lineProblems(plan: Plan): Problem[] {
     if (given >= min && given <= max) return
     const range = `${round(min)} to ${round(max)} m`
     problems.push({ key, given, message: `${key} must be from ${range}: ${why}`, min, max })
+  }
+  if (line.pull === 'tail') {
+    if (trim.held !== 'sheet') {
+      problems.push({
+        key: `trim.${setup.source}.held`,
+        given: trim.held,
+        message: `trim.${setup.source}.held must be sheet: a sail held fast gives its sheet's tail no way to work the tiller`,
+      })
+    }
+    const swing = (trim.sheetAngleDeg * Math.PI) / 180
+    const most = round(source.sheetParts * source.sheetReach * swing)
+    limit('line.takeUp', line.takeUp, -0.5, most, 'more would haul the boom past amidships')
   }
   const reach = boat.tiller.length
   limit('line.tillerRadius', line.tillerRadius, 0.1, reach, 'the tiller is no longer than that')
@@ -143,16 +246,28 @@ function lineProblems(plan: Plan): Problem[] {
     }
   })
 
+  limit('elastic.anchorX', elastic.anchorX, -1.5, boat.hull.bowX, 'it is made fast on the boat')
+  limit('elastic.anchorY', elastic.anchorY, 0.1, half + 0.1, 'it is made fast on the boat')
+  const strained = round(MOST_STRAIN * elastic.naturalLength)
+  limit('elastic.stretch', elastic.stretch, -0.5, strained, 'its jacket locks beyond that')
   const anchor = { x: elastic.anchorX, y: elastic.anchorY, z: elastic.anchorZ }
   const span = distance(anchor, { x: elastic.tillerRadius, y: 0, z: boat.tiller.height })
   const room = span - Math.max(elastic.stretch, 0)
-  limit(
-    'elastic.naturalLength',
-    elastic.naturalLength,
-    0.15,
-    room,
-    'stretched, it must fit between its anchor and the tiller',
-  )
+  if (room < 0.15) {
+    problems.push({
+      key: 'elastic.stretch',
+      given: elastic.stretch,
+      message: `elastic.stretch leaves the cord no room: it is made fast ${round(span)} m from the tiller`,
+    })
+  } else {
+    limit(
+      'elastic.naturalLength',
+      elastic.naturalLength,
+      0.15,
+      room,
+      'stretched, it must fit between its anchor and the tiller',
+    )
+  }
   return problems
 }
 

@@ -42,7 +42,7 @@ export function metricsOf(
     most = Math.max(most, Math.abs(error))
   }
   const within = judged ? inside / means.length : 0
-  const meanSpeedKn = watch.samples > 0 ? watch.speedSum / watch.samples : 0
+  const meanSpeedKn = judged ? watch.judgedSpeedSum / means.length : 0
   const holds =
     ended &&
     judged &&

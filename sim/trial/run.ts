@@ -17,7 +17,7 @@ import { createSystem, type System } from '../boat/system'
 import { type Vessel, vesselOf } from '../boat/vessel'
 import { DEGREE, KNOT } from '../constants'
 import { atan2, hypot } from '../elementary'
-import { adaptive } from '../integrate/adaptive'
+import { adaptive, StepLimitError } from '../integrate/adaptive'
 import { rungeKutta } from '../integrate/runge-kutta'
 import { wrapAngle } from '../numbers'
 import { judgingParameters } from '../parameters/judging'
@@ -30,7 +30,7 @@ import { verdictOf } from './verdict'
 import { WATCH_STEP, type Watch, watchOf } from './watch'
 
 /** Clock of a run, s: every step, watch and output time is a whole number of ticks. */
-const TICK = 0.05
+export const TICK = 0.05
 /** Tolerance of the adaptive solver in a run, SI on every state. */
 const ADAPTIVE_TOLERANCE = 1e-7
 /** Largest pull a deflected sheet is reckoned with for the step, over its tension in balance. */
@@ -46,6 +46,14 @@ interface Run {
 }
 
 type Recorder = (t: number, y: Float64Array, system: System, courseToWind: number) => void
+
+function ticksOf(seconds: number): number {
+  return Math.round(seconds / TICK)
+}
+
+function outputTicksOf(request: TrialRequest): number {
+  return Math.max(1, ticksOf(request.outputIntervalS))
+}
 
 /** A run from balance to the end or, where asked, to the moment it is lost. */
 function sail(
@@ -68,9 +76,9 @@ function sail(
   const watch = watchOf(vessel, asked, rigged)
   const recorder = record(vessel)
 
-  const ticks = Math.round(durationS / TICK)
+  const ticks = ticksOf(durationS)
   const watchTicks = Math.round(WATCH_STEP / TICK)
-  const outputTicks = Math.max(1, Math.round(request.outputIntervalS / TICK))
+  const outputTicks = outputTicksOf(request)
   const substeps = Math.round(TICK / stepFor(vessel, GUST_SHEET * balance.sheetTension))
   const fixed = rungeKutta(system.size, system.derivative)
   const reference =
@@ -87,7 +95,7 @@ function sail(
     if (watching || writing) {
       system.derivative(t, y, rate)
       if (watching) watch.see(t, y, system.observed)
-      if (writing) recorder?.(t, y, system, watch.courseToWind)
+      if (writing && !watch.outOfRange) recorder?.(t, y, system, watch.courseToWind)
     }
     if (tick >= ticks || watch.outOfRange || (stopWhenLost && watch.lost)) break
     if (reference) {
@@ -96,7 +104,13 @@ function sail(
         (Math.floor(tick / watchTicks) + 1) * watchTicks,
         (Math.floor(tick / outputTicks) + 1) * outputTicks,
       )
-      reference(t, next * TICK, y)
+      try {
+        reference(t, next * TICK, y)
+      } catch (error) {
+        if (!(error instanceof StepLimitError)) throw error
+        watch.stop(t, 'The adaptive solver could not go on')
+        break
+      }
       tick = next
     } else {
       const h = TICK / substeps
@@ -117,11 +131,10 @@ export function runHolds(request: TrialRequest): Metrics {
  * Sails a boat under a setup for a time and judges her.
  *
  * Pure: the same request gives the same result. The plan must be free of problems (see plan/problems).
- *
- * @throws StepLimitError when the adaptive solver is asked for and cannot finish
+ * Output times are rounded to the clock of the run, a twentieth of a second.
  */
 export function runTrial(request: TrialRequest): TrialResult {
-  const columns = Math.floor(request.durationS / request.outputIntervalS) + 3
+  const columns = Math.ceil(ticksOf(request.durationS) / outputTicksOf(request)) + 2
   const series = {} as Series
   for (const key of Object.keys(channels) as Channel[]) series[key] = new Float64Array(columns)
   const boomDeg: Record<string, Float64Array> = {}
@@ -133,7 +146,6 @@ export function runTrial(request: TrialRequest): TrialResult {
       drawing[id] = new Float64Array(columns)
     }
     return (t, y, system, courseToWind) => {
-      if (row >= columns) return
       writeRow(series, row, t, y, system, courseToWind)
       vessel.sails.forEach(({ id }, k) => {
         ;(boomDeg[id] as Float64Array)[row] = (y[BOOM + k] as number) / DEGREE
@@ -221,6 +233,6 @@ function planned(request: TrialRequest): Happening[] {
       if (kind === 'wave-set')
         return { atS, code: kind, text: `Wave set, ${event.heightM} m higher` }
       const name = request.plan.boat.sails[event.sail]?.name ?? event.sail
-      return { atS, code: kind, text: `${name} reefed by ${event.percent} %` }
+      return { atS, code: kind, text: `${name} reefed, ${event.percent} % of it taken in` }
     })
 }

@@ -62,6 +62,7 @@ export type VerdictCode =
   | 'gybes'
   | 'broaches'
   | 'too-slow'
+  | 'not-judged'
   | 'stopped'
 
 /** How the run went. */

@@ -2,11 +2,26 @@ import type { Balance } from '../analysis/balance'
 import { DEGREE } from '../constants'
 import { atan2, cos, sin } from '../elementary'
 import { wrapAngle } from '../numbers'
+import { judgingParameters } from '../parameters/judging'
 import type { Helm } from '../plan/types'
 import type { Happening, Metrics, Verdict, VerdictCode } from './types'
 import { WATCH_STEP, type Watch } from './watch'
 
+/** Closer than this a boat that was asked to sail lower lies luffing, degrees. */
 const CLOSE_TO_THE_WIND = 35
+const LUFFING_MARGIN = 8
+/** More helm than this in balance is told as the reason before anything else, degrees. */
+const MUCH_HELM = 8
+/** Shares of the time from which slackness and the stop are told as the reason. */
+const OFTEN_SLACK = 0.25
+const OFTEN_ON_STOP = 0.1
+
+const judge = {
+  band: judgingParameters.bandDeg.default,
+  within: judgingParameters.withinShare.default,
+  unjudged: judgingParameters.unjudgedS.default,
+  broachHeel: judgingParameters.broachHeelDeg.default,
+}
 
 function minutes(atS: number): string {
   if (atS < 90) return `${Math.round(atS / 5) * 5} seconds`
@@ -23,7 +38,7 @@ function drift(means: number[]): number {
   let bottom = 0
   for (let i = 0; i < n; i++) {
     top += (i - middle) * wrapAngle((means[i] as number) - (means[0] as number))
-    bottom += (i - middle) ** 2
+    bottom += (i - middle) * (i - middle)
   }
   return (top / bottom / DEGREE) * (60 / WATCH_STEP)
 }
@@ -53,16 +68,17 @@ export function verdictOf(
   balance: Balance,
 ): Verdict {
   const [code, text] = sentence(watch, metrics, Math.abs(asked) / DEGREE)
-  return { code, text, reason: reasonOf(watch, metrics, code, helm, balance) }
+  return { code, text, reason: reasonOf(watch, code, helm, balance) }
 }
 
 function sentence(watch: Watch, metrics: Metrics, asked: number): [VerdictCode, string] {
   const { happenings, means } = watch
-  const mean = Math.round(Math.abs(metrics.meanCourseToWindDeg))
+  const average = Math.abs(metrics.meanCourseToWindDeg)
+  const mean = Math.round(average)
   const trend = drift(means)
   const rounded = Math.round(asked)
   const stopped = first(happenings, 'left-valid-range')
-  if (stopped) return ['stopped', `Knocked flat after ${minutes(stopped.atS)}`]
+  if (stopped) return ['stopped', `${stopped.text} after ${minutes(stopped.atS)}`]
   const tacked = first(happenings, 'tacked')
   const gybed = first(happenings, 'gybed')
   const broached = first(happenings, 'broached')
@@ -73,7 +89,8 @@ function sentence(watch: Watch, metrics: Metrics, asked: number): [VerdictCode, 
   }
   if (earliest === gybed && gybed) return ['gybes', `Gybes after ${minutes(gybed.atS)}`]
   if (broached) {
-    if (metrics.maxHeelDeg > 45) return ['broaches', `Broaches after ${minutes(broached.atS)}`]
+    if (metrics.maxHeelDeg > judge.broachHeel)
+      return ['broaches', `Broaches after ${minutes(broached.atS)}`]
     const where = lastCourse(means)
     return Math.abs(where) < asked
       ? ['broaches', `Rounds up far off course after ${minutes(broached.atS)}`]
@@ -83,17 +100,20 @@ function sentence(watch: Watch, metrics: Metrics, asked: number): [VerdictCode, 
     const give = Math.max(1, Math.round(spreadOf(watch)))
     return ['holds', `Holds ${mean} degrees to the wind, give or take ${give}`]
   }
-  const steady = metrics.withinBandFraction >= 0.95
-  if (steady && Math.abs(mean - asked) > 15) {
-    const way = mean < asked ? 'higher' : 'lower'
+  if (means.length === 0) {
+    return ['not-judged', `Too short to judge: the first ${judge.unjudged} seconds do not count`]
+  }
+  const steady = metrics.withinBandFraction >= judge.within
+  if (steady && Math.abs(average - asked) > judge.band) {
+    const way = average < asked ? 'higher' : 'lower'
     return ['holds-other-course', `Settles at ${mean} degrees, ${way} than the ${rounded} asked`]
   }
   if (steady) return ['too-slow', `Lies at ${mean} degrees with hardly any way on`]
   const end = lastCourse(means)
   if (trend < -1 && end < asked) {
     const close = means.findIndex((course) => Math.abs(course) / DEGREE < CLOSE_TO_THE_WIND)
-    if (close >= 0 && asked > CLOSE_TO_THE_WIND + 8) {
-      const after = minutes(60 + close * WATCH_STEP)
+    if (close >= 0 && asked > CLOSE_TO_THE_WIND + LUFFING_MARGIN) {
+      const after = minutes(judge.unjudged + close * WATCH_STEP)
       return ['creeps-to-windward', `Creeps to windward, luffs after ${after}`]
     }
     return [
@@ -104,7 +124,8 @@ function sentence(watch: Watch, metrics: Metrics, asked: number): [VerdictCode, 
   if (trend > 1 && end > asked) {
     return ['sags-to-leeward', `Sags to leeward, ${Math.round(end - asked)} degrees by the end`]
   }
-  if (mean < CLOSE_TO_THE_WIND && asked > mean + 8) return ['luffs', 'Comes up and lies luffing']
+  if (average < CLOSE_TO_THE_WIND && asked > average + LUFFING_MARGIN)
+    return ['luffs', 'Comes up and lies luffing']
   return ['hunts', `Hunts ${Math.round(2 * spreadOf(watch))} degrees from side to side`]
 }
 
@@ -117,17 +138,14 @@ function spreadOf(watch: Watch): number {
   for (const mean of means) sum += wrapAngle(mean - origin)
   const average = sum / means.length
   let squares = 0
-  for (const mean of means) squares += (wrapAngle(mean - origin) - average) ** 2
+  for (const mean of means) {
+    const away = wrapAngle(mean - origin) - average
+    squares += away * away
+  }
   return Math.sqrt(squares / means.length) / DEGREE
 }
 
-function reasonOf(
-  watch: Watch,
-  metrics: Metrics,
-  code: VerdictCode,
-  helm: Helm,
-  balance: Balance,
-): string {
+function reasonOf(watch: Watch, code: VerdictCode, helm: Helm, balance: Balance): string {
   if (helm === 'lashed') {
     return 'The tiller is lashed where the boat balances: only hull and sails answer a change of heading.'
   }
@@ -138,25 +156,23 @@ function reasonOf(
   const stop = watch.onStop / n
   const slackLine = watch.slackLine / n
   const slackElastic = watch.slackElastic / n
-  const swing =
-    Math.sqrt(Math.max(0, watch.tillerSquares / n - (watch.tillerSum / n) ** 2)) / DEGREE
+  const tiller = watch.tillerSum / n
+  const swing = Math.sqrt(Math.max(0, watch.tillerSquares / n - tiller * tiller)) / DEGREE
   if (!balance.found) {
     return 'She has no balance at this course and trim with the tiller inside its stops: balance the sails first.'
   }
-  if (Math.abs(balance.tillerDeg) > 8) {
+  if (Math.abs(balance.tillerDeg) > MUCH_HELM) {
     return `She needs ${Math.round(Math.abs(balance.tillerDeg))} degrees of tiller to stay on course: out of balance before the line is asked to steer.`
   }
-  if (slackLine > 0.25) {
+  if (slackLine > OFTEN_SLACK) {
     return `The control line is slack ${Math.round(100 * slackLine)} % of the time: the elastic alone brings her up.`
   }
-  if (slackElastic > 0.25) {
+  if (slackElastic > OFTEN_SLACK) {
     return `The elastic is slack ${Math.round(100 * slackElastic)} % of the time: nothing brings her back up.`
   }
-  if (stop > 0.1) {
+  if (stop > OFTEN_ON_STOP) {
     return `The tiller lies on its stop ${Math.round(100 * stop)} % of the time: too much pull for the stroke.`
   }
   const work = `Line ${line} N against elastic ${elastic} N on average, the tiller working ${swing.toFixed(1)} degrees either way.`
-  if (code === 'holds') return work
-  if (Math.abs(metrics.meanCourseToWindDeg) < 1e-9) return work
-  return swing < 1 ? `${work} The pull hardly changes with her heading.` : work
+  return code !== 'holds' && swing < 1 ? `${work} The pull hardly changes with her heading.` : work
 }

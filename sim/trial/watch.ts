@@ -32,6 +32,13 @@ const TELL_MOST = 8
 const SLACK_TIME = 1
 
 /** What has been seen of a run so far; angles in rad, loads in N, speed in knots. */
+/** Why the model means nothing here, or undefined while it does. */
+function leftRange(heel: number, speed: number, topSpeed: number): string | undefined {
+  if (!Number.isFinite(heel) || !Number.isFinite(speed)) return 'The numbers ran away'
+  if (Math.abs(heel) >= CAPSIZED) return 'Knocked flat'
+  return speed > topSpeed ? 'Faster than the resistance is known' : undefined
+}
+
 export interface Watch {
   /** Course to the wind against its one-minute mean direction, rad, positive over the starboard side. */
   courseToWind: number
@@ -42,7 +49,8 @@ export interface Watch {
   /** When the run was lost, s, or so far. */
   lastedS: number
   outOfRange: boolean
-  speedSum: number
+  /** Sum of the judged samples' speed, kn. */
+  judgedSpeedSum: number
   heelMost: number
   lineMost: number
   elasticMost: number
@@ -56,6 +64,8 @@ export interface Watch {
   lineSum: number
   elasticSum: number
   see(t: number, y: Float64Array, observed: Observation): void
+  /** Ends the run for a named reason. */
+  stop(atS: number, reason: string): void
 }
 
 class Ring {
@@ -87,6 +97,7 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
   const booms = vessel.sails.map((sail) => sail.heldAt)
   const told = new Map<Happening['code'], { count: number; atS: number }>()
   const lasting = { error: 0, line: 0, elastic: 0 }
+  const topSpeed = (vessel.resistance.length - 2) * vessel.speedStep
   let side = vessel.tack as number
 
   function tell(code: Happening['code'], atS: number, text: string): void {
@@ -106,7 +117,7 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
     lost: false,
     lastedS: 0,
     outOfRange: false,
-    speedSum: 0,
+    judgedSpeedSum: 0,
     heelMost: 0,
     lineMost: 0,
     elasticMost: 0,
@@ -119,6 +130,11 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
     tillerSquares: 0,
     lineSum: 0,
     elasticSum: 0,
+    stop(atS, reason) {
+      watch.lost = true
+      watch.outOfRange = true
+      tell('left-valid-range', atS, reason)
+    },
     see(t, y, observed) {
       const heading = y[HEADING] as number
       const heel = y[HEEL] as number
@@ -130,10 +146,9 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       courseCos.push(cos(course))
       courseSin.push(sin(course))
       const speed = hypot(y[SURGE] as number, y[SWAY] as number)
-      if (!(Math.abs(heel) < CAPSIZED) || !Number.isFinite(speed)) {
-        watch.lost = true
-        watch.outOfRange = true
-        tell('left-valid-range', t, 'Knocked flat: the model ends here')
+      const out = leftRange(heel, speed, topSpeed)
+      if (out) {
+        watch.stop(t, out)
         return
       }
 
@@ -158,13 +173,17 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       }
       if (Math.abs(heel) > judge.broachHeel) {
         watch.lost = true
-        tell('broached', t, 'Heeled past 45 degrees')
+        tell('broached', t, `Heeled past ${judgingParameters.broachHeelDeg.default} degrees`)
       }
       const error = Math.abs(wrapAngle(course - asked))
       lasting.error = error > judge.broachError ? lasting.error + WATCH_STEP : 0
       if (lasting.error >= judge.broachTime) {
         watch.lost = true
-        tell('broached', t, 'More than 60 degrees off course')
+        tell(
+          'broached',
+          t,
+          `More than ${judgingParameters.broachErrorDeg.default} degrees off course`,
+        )
       }
 
       if (!watch.lost) watch.lastedS = t
@@ -184,7 +203,6 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       }
 
       watch.samples++
-      watch.speedSum += speed / KNOT
       watch.heelMost = Math.max(watch.heelMost, Math.abs(heel) / DEGREE)
       watch.lineMost = Math.max(watch.lineMost, observed.lineTension)
       watch.elasticMost = Math.max(watch.elasticMost, observed.elasticTension)
@@ -194,6 +212,7 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       watch.lineSum += observed.lineTension
       watch.elasticSum += observed.elasticTension
       if (t >= judge.unjudged) {
+        watch.judgedSpeedSum += speed / KNOT
         watch.means.push(vessel.tack * atan2(courseSin.sum, courseCos.sum))
       }
     },

@@ -38,7 +38,7 @@ export function eventInWords(event: TrialEvent, plan: Plan, units: Units): strin
       return `Wave set of ${inWords(rounded('m', event.heightM, units, 0.1))} for ${event.durationS} s`
     case 'reef': {
       const sail = plan.boat.sails[event.sail]?.name ?? event.sail
-      return `${sail} reefed to ${100 - event.percent} %`
+      return `${sail} reefed, ${event.percent} % of it taken in`
     }
   }
 }

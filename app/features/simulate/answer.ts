@@ -38,6 +38,7 @@ const verdictCodes = namesOf<VerdictCode>({
   gybes: true,
   broaches: true,
   'too-slow': true,
+  'not-judged': true,
   stopped: true,
 })
 

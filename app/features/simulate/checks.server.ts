@@ -34,13 +34,13 @@ function whereGiven(asked: SimulateRequest, key: string): string {
 }
 
 function eventErrors(asked: SimulateRequest, plan: Plan): FieldError[] {
-  const sails = Object.keys(plan.boat.sails)
+  const sails = Object.keys(plan.boat.sails).filter((id) => plan.setup.trim[id]?.set === 'yes')
   return (asked.conditions.events ?? []).flatMap((event, place) => {
     if (event.kind !== 'reef' || sails.includes(event.sail)) return []
     return {
       field: `conditions.events.${place}.sail`,
       given: event.sail,
-      message: `the boat has no such sail; it must be one of ${sails.join(', ')}`,
+      message: `must be a sail that is set: ${sails.join(', ')}`,
       allowed: sails,
     }
   })

@@ -1,4 +1,5 @@
 import { boatSchema, conditionsSchema, setupSchema, trialEventSchema } from 'sim/plan/schema'
+import { TICK } from 'sim/trial/run'
 import { z } from 'zod'
 import { bounds } from './bounds'
 
@@ -43,11 +44,18 @@ export const simulateRequestSchema = z.strictObject({
     ),
   solver: z.enum(['fixed-step', 'adaptive']).default('fixed-step'),
   helm: z.enum(['sheet-to-tiller', 'lashed', 'free']).default('sheet-to-tiller'),
-  durationS: z.number().min(durationS.min).max(durationS.max).default(durationS.default),
+  durationS: z
+    .number()
+    .min(durationS.min)
+    .max(durationS.max)
+    .multipleOf(TICK)
+    .default(durationS.default)
+    .describe(`A multiple of ${TICK} s, the clock of a run`),
   outputIntervalS: z
     .number()
     .min(outputIntervalS.min)
     .max(outputIntervalS.max)
+    .multipleOf(TICK)
     .default(outputIntervalS.default)
     .describe(`At most the duration, and at least the duration / ${bounds.samples}`),
 })
