@@ -20,7 +20,6 @@ const judge = {
   band: judgingParameters.bandDeg.default,
   within: judgingParameters.withinShare.default,
   unjudged: judgingParameters.unjudgedS.default,
-  broachHeel: judgingParameters.broachHeelDeg.default,
 }
 
 function minutes(atS: number): string {
@@ -89,12 +88,7 @@ function sentence(watch: Watch, metrics: Metrics, asked: number): [VerdictCode, 
   }
   if (earliest === gybed && gybed) return ['gybes', `Gybes after ${minutes(gybed.atS)}`]
   if (broached) {
-    if (metrics.maxHeelDeg > judge.broachHeel)
-      return ['broaches', `Broaches after ${minutes(broached.atS)}`]
-    const where = lastCourse(means)
-    return Math.abs(where) < asked
-      ? ['broaches', `Rounds up far off course after ${minutes(broached.atS)}`]
-      : ['broaches', `Bears away far off course after ${minutes(broached.atS)}`]
+    return ['broaches', `${broached.text} after ${minutes(broached.atS)}`]
   }
   if (metrics.holds) {
     const give = Math.max(1, Math.round(spreadOf(watch)))

@@ -173,17 +173,18 @@ export function watchOf(vessel: Vessel, asked: number, rigged: boolean): Watch {
       }
       if (Math.abs(heel) > judge.broachHeel) {
         watch.lost = true
-        tell('broached', t, `Heeled past ${judgingParameters.broachHeelDeg.default} degrees`)
-      }
-      const error = Math.abs(wrapAngle(course - asked))
-      lasting.error = error > judge.broachError ? lasting.error + WATCH_STEP : 0
-      if (lasting.error >= judge.broachTime) {
-        watch.lost = true
         tell(
           'broached',
           t,
-          `More than ${judgingParameters.broachErrorDeg.default} degrees off course`,
+          `Broaches, heeled past ${judgingParameters.broachHeelDeg.default} degrees,`,
         )
+      }
+      // Positive bears away, also where she has gone past dead before the wind.
+      const off = vessel.tack * wrapAngle(course - asked)
+      lasting.error = Math.abs(off) > judge.broachError ? lasting.error + WATCH_STEP : 0
+      if (lasting.error >= judge.broachTime) {
+        watch.lost = true
+        tell('broached', t, off < 0 ? 'Rounds up far off course' : 'Bears away far off course')
       }
 
       if (!watch.lost) watch.lastedS = t
