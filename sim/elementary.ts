@@ -1,7 +1,7 @@
 /**
  * Elementary functions that give the same bits on every engine. JavaScript leaves the last digits of Math.sin and its
  * kin to the engine, and a boat near the edge of holding turns a last digit into another run; these use only
- * operations that IEEE 754 fixes (+ - * / and the square root). Each is within two units in the last place of the
+ * operations that IEEE 754 fixes (+ - * / and the square root). Each is within four units in the last place of the
  * true value over the arguments a run meets.
  */
 
