@@ -137,7 +137,8 @@ export function createSailLoads(
         // Behind a squared-off main on the same side a headsail stands in its lee.
         if (lee > 0 && sail.kind === 'headsail') {
           const main = y[BOOM + mainIndex] as number
-          const sameSide = smoothStep(-SIDE_BAND, SIDE_BAND, main < 0 ? -boom : boom)
+          const mainSide = main / Math.sqrt(main * main + SIDE_SOFTNESS * SIDE_SOFTNESS)
+          const sameSide = smoothStep(-SIDE_BAND, SIDE_BAND, mainSide * boom)
           pressure *= 1 - LEE_LOSS * lee * sameSide
         }
         const lift = sailLift(incidence, boom, sail.curve)

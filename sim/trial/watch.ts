@@ -31,7 +31,6 @@ const TELL_MOST = 8
 /** Slackness shorter than this is not told, s. */
 const SLACK_TIME = 1
 
-/** What has been seen of a run so far; angles in rad, loads in N, speed in knots. */
 /** Why the model means nothing here, or undefined while it does. */
 function leftRange(heel: number, speed: number, topSpeed: number): string | undefined {
   if (!Number.isFinite(heel) || !Number.isFinite(speed)) return 'The numbers ran away'
@@ -39,6 +38,7 @@ function leftRange(heel: number, speed: number, topSpeed: number): string | unde
   return speed > topSpeed ? 'Faster than the resistance is known' : undefined
 }
 
+/** What has been seen of a run so far; angles in rad, loads in N, speed in knots. */
 export interface Watch {
   /** Course to the wind against its one-minute mean direction, rad, positive over the starboard side. */
   courseToWind: number

@@ -63,13 +63,14 @@ function dot(a: Triple, b: Triple): number {
   return a[0] * b[0] + a[1] * b[1] + a[2] * b[2]
 }
 
-describe('path of the deflected part', () => {
-  // Longer than the straight part by (computed): mid-span 1 m, .05 m: .0049876; 1.5 m, .2 m: .052417; .6 and .9 m, .1 m: .013815.
+describe('sheet taken by the deflected part', () => {
+  // The path is longer than the straight part by (computed): mid-span 1 m, .05 m: .0049876; 1.5 m, .2 m: .052417;
+  // .6 and .9 m, .1 m: .013815. Off the middle a hitch that is made fast takes a little more.
   test.each([
     [0.5, 0.5, 0.05, 0.0049876],
     [0.75, 0.75, 0.2, 0.052417],
     [0.6, 0.9, 0.1, 0.013815],
-  ])('%d and %d m, out by %d m, as the solver eases the sheet', (held, live, out, more) => {
+  ])('%d and %d m, out by %d m, within a hundredth of the longer path', (held, live, out, more) => {
     const [sail] = vesselOf(plainPlan).sails
     const span = held + live
     // A part that stands upright on the centreline, its first lead square off to windward at the hitch.
@@ -82,13 +83,13 @@ describe('path of the deflected part', () => {
       blockY: 0,
       blockZ: 1,
       boomZ: 1 + span,
+      boomAtRest: 0,
       hitchShare: held / span,
       firstX: 0,
-      firstY: 2,
+      firstY: 0.3,
       firstZ: 1 + held,
       takeUp: out,
-      hitchToLeadAtRest: 2,
-      pathExtraAtRest: 0,
+      hitchToLeadAtRest: 0.3,
       parts: 1,
       stiffness: 1e12,
       exponent: 0,
@@ -100,9 +101,42 @@ describe('path of the deflected part', () => {
       tillerZ: 1,
     }
     const solver = createLineSolver(line)
-    expect(-solver.easedLength(0, 0, 500)).toBeCloseTo(more, 6)
+    expect(solver.easedLength(0, 0, 500)).toBeCloseTo(0, 9)
     expect(solver.tension(0, 0, 500, 0)).toBeCloseTo(500 * square(held, live, out), 4)
     expect(solver.hitchOut).toBeCloseTo(out, 6)
+    // With the tiller gone over to the lead the line is slack, and the sheet has all of it back.
+    const back = solver.easedLength(0, -0.6, 500)
+    expect(Math.abs(back / more - 1)).toBeLessThan(0.01)
+  })
+
+  test('is worth the work that the pull does', () => {
+    // Virtual work: F d(out) = T d(sheet), whatever the direction of the pull.
+    const [sail] = vesselOf(plainPlan).sails
+    const rigged = {
+      ...controlLineOf(plainPlan, sail, 1),
+      parts: 1,
+      stiffness: 1e12,
+      exponent: 0,
+      leadToTillerAtRest: Math.hypot(0.5, 1),
+      lastX: 0.5,
+      lastY: 1,
+      lastZ: 1,
+      tillerRadius: 1,
+      tillerZ: 1,
+    }
+    const boom = sail?.heldAt ?? 0
+    const at = (takeUp: number) => {
+      const solver = createLineSolver({ ...rigged, takeUp })
+      const pull = solver.tension(boom, 0, 300, 0)
+      // With the tiller far over the line is slack, and the sheet has back what the hitch took.
+      return { pull, sheet: solver.easedLength(boom, -0.9, 300) }
+    }
+    for (const takeUp of [0.1, 0.25, 0.4]) {
+      const before = at(takeUp - 0.02)
+      const after = at(takeUp + 0.02)
+      const work = at(takeUp).pull * 0.04
+      expect((300 * (after.sheet - before.sheet)) / work).toBeCloseTo(1, 2)
+    }
   })
 })
 

@@ -114,21 +114,20 @@ describe('water in a wave', () => {
   test.each([2, 3.5, 6])(
     'pushes and turns the hull as its strips together in a %d s wave',
     (wavePeriod) => {
-      // Salvesen, Tuck & Faltinsen 1970 in its long-wave form: each strip, of a share 3/4 (1 - s^2) of the lateral mass, goes
-      // with the water. Summed here strip by strip; the model uses the closed form.
       const vessel = vesselOf(plainPlan)
       const loads = createWaveLoads(single(wavePeriod, 0.3), vessel)
       const omega = (2 * Math.PI) / wavePeriod
       const k = (omega * omega) / GRAVITY
       const acceleration = 0.3 * omega * omega * Math.exp((-k * vessel.draught) / 2)
-      const whole = vessel.swayMass * acceleration
+      const whole = (vessel.swayMass - vessel.keelMass) * acceleration
+      const keel = vessel.keelMass * 0.3 * omega * omega * Math.exp(-k * vessel.keel.depth)
       for (const degrees of [20, 45, 80, 130, -70]) {
         // Heading that puts the wave, which runs north, this far off the bow; x forward, sway to starboard.
         const cosine = Math.cos(degrees * DEGREE)
         const sine = Math.sin(degrees * DEGREE)
         for (const t of [0.3, 1.1]) {
           loads.update(0, 0, cosine, sine, t, 1)
-          let sway = 0
+          let sway = sine * Math.sin(omega * t) * keel
           let yaw = 0
           const strips = 2000
           for (let i = 0; i < strips; i++) {
