@@ -126,4 +126,85 @@ describe('what only several values together tell', () => {
     expect(named.max).toBeLessThan(3)
     expect(named.message).toContain('fit')
   })
+
+  test('an elastic strained beyond its jacket', () => {
+    const short = withValue(deflected, 'elastic.naturalLength', 0.3)
+    const named = problem(withValue(short, 'elastic.stretch', 0.5), 'elastic.stretch')
+    expect(named.max).toBeLessThan(0.5)
+    expect(named.message).toContain('jacket')
+    expect(problemsOf(withValue(short, 'elastic.stretch', named.max ?? 0))).toEqual([])
+  })
+
+  test('an elastic for whose stretch there is no room at all', () => {
+    const near = withValue(withValue(deflected, 'elastic.anchorX', 0.7), 'elastic.anchorY', 0.3)
+    const level = withValue(near, 'elastic.anchorZ', deflected.boat.tiller.height)
+    expect(problem(withValue(level, 'elastic.stretch', 0.25), 'elastic.stretch').given).toBe(0.25)
+  })
+
+  test.each([
+    ['elastic.anchorX', 10],
+    ['elastic.anchorY', 2.5],
+  ])('an elastic made fast off the boat: %s %d', (key, given) => {
+    expect(problem(withValue(deflected, key, given), key).message).toContain('on the boat')
+  })
+
+  test.each([10, -10, 0])(
+    'a course of %d degrees, closer to the wind than any sail draws',
+    (course) => {
+      const key = 'conditions.trueWindAngleDeg'
+      expect(problem(withValue(deflected, key, course), key).message).toContain('25 to 180')
+      expect(problemsOf(withValue(deflected, key, course < 0 ? -25 : 25))).toEqual([])
+    },
+  )
+
+  test('a waterline longer than the boat', () => {
+    const { lengthOverall } = deflected.boat.hull
+    const named = problem(
+      withValue(deflected, 'hull.waterlineLength', lengthOverall + 0.05),
+      'hull.waterlineLength',
+    )
+    expect(named.max).toBe(lengthOverall)
+  })
+
+  test.each([500, 16000])('a displacement of %d kg that the canoe body cannot have', (given) => {
+    const named = problem(withValue(deflected, 'hull.displacement', given), 'hull.displacement')
+    expect(named.message).toContain(`${named.min} to ${named.max} kg`)
+    expect(problemsOf(withValue(deflected, 'hull.displacement', named.max ?? 0))).toEqual([])
+  })
+
+  test('a sheet made fast beyond the end of the foot', () => {
+    const named = problem(withValue(deflected, 'sails.main.sheetReach', 5), 'sails.main.sheetReach')
+    expect(named.max).toBeGreaterThanOrEqual(deflected.boat.sails.main?.footLength ?? 0)
+  })
+
+  test.each(['pole', 'backed'])('a main held to windward: %s', (held) => {
+    const named = problem(withValue(deflected, 'trim.main.held', held), 'trim.main.held')
+    expect(named.message).toContain('sheet or preventer')
+  })
+
+  test('a mainsheet led from under the pivot of its boom', () => {
+    const { main } = deflected.boat.sails
+    const plan = withValue(deflected, 'sails.main.sheetX', Math.round((main?.luffX ?? 0) * 20) / 20)
+    expect(problem(plan, 'sails.main.sheetX').message).toContain('pivot')
+  })
+
+  describe('of a tail', () => {
+    const tail = withValue(withValue(deflected, 'line.pull', 'tail'), 'line.takeUp', 0)
+
+    test('which as such may be sailed', () => {
+      expect(problemsOf(tail)).toEqual([])
+    })
+
+    test('a sail that is held fast', () => {
+      const named = problem(withValue(tail, 'trim.main.held', 'preventer'), 'trim.main.held')
+      expect(named.message).toContain('must be sheet')
+    })
+
+    test('hauled until the boom would pass amidships', () => {
+      const hard = withValue(tail, 'trim.main.sheetAngleDeg', 3)
+      const named = problem(withValue(hard, 'line.takeUp', 1.5), 'line.takeUp')
+      expect(named.message).toContain('amidships')
+      expect(problemsOf(withValue(hard, 'line.takeUp', named.max ?? 0))).toEqual([])
+    })
+  })
 })
