@@ -42,16 +42,31 @@ export function typeset(symbol: string): string {
   return `$${fraction.join('/')}$`
 }
 
-function row(name: string, parameter: Parameter): string {
+const heads = ['what', 'symbol', 'key', 'allowed', 'default', 'source']
+
+function row(name: string, parameter: Parameter): string[] {
   const { label, source } = parameter
   if (parameter.type === 'choice') {
     const options = Object.entries(parameter.options).map(([key, words]) => `\`${key}\` ${words}`)
-    return `| ${label} | | \`${name}\` | ${options.join('; ')} | \`${parameter.default}\` | ${source} |`
+    return [label, '', `\`${name}\``, options.join('; '), `\`${parameter.default}\``, source]
   }
   const { min, max, unit, whole, symbol } = parameter
   const range = `${min} to ${max} ${units[unit] ?? unit}`.trimEnd()
-  const only = whole ? ', whole' : ''
-  return `| ${label} | ${typeset(symbol)} | \`${name}\` | ${range}${only} | ${parameter.default} | ${source} |`
+  const allowed = whole ? `${range}, whole` : range
+  return [label, typeset(symbol), `\`${name}\``, allowed, String(parameter.default), source]
+}
+
+/** Rows under their heads, columns aligned as the project formats its pages. */
+function aligned(rows: string[][]): string[] {
+  const lines = [heads, ...rows]
+  const widths = heads.map((_, i) => Math.max(...lines.map((line) => line[i]?.length ?? 0)))
+  const written = lines.map((line) => line.map((cell, i) => cell.padEnd(widths[i] ?? 0)))
+  written.splice(
+    1,
+    0,
+    widths.map((width) => '-'.repeat(width)),
+  )
+  return written.map((line) => `| ${line.join(' | ')} |`)
 }
 
 /** The parameter tables as a part of a page. */
@@ -62,9 +77,7 @@ export function parameterTables(): string {
         `### ${heading}`,
         '',
         ...(keys ? [`Keys begin with \`${keys}\`.`, ''] : []),
-        '| what | symbol | key | allowed | default | source |',
-        '|---|---|---|---|---|---|',
-        ...Object.entries(table).map(([name, parameter]) => row(name, parameter)),
+        ...aligned(Object.entries(table).map(([name, parameter]) => row(name, parameter))),
       ].join('\n'),
     )
     .join('\n\n')
