@@ -65,6 +65,28 @@ export const demoSetups: Setup[] = [
     conditions: { ...conditions, trueWindSpeedKn: 14, trueWindAngleDeg: 115, peakWavePeriodS: 4.2 },
   },
   {
+    id: 'long-keel-28-running-steering-sail',
+    name: 'Running in a moderate breeze, steering sail',
+    summary:
+      'Reefed main under a preventer; a small sail aft whose sheet goes to nothing but the tiller.',
+    boatId: 'long-keel-28',
+    trim: { main: set(77, 50, 'preventer'), genoa: stowed, jib: stowed, steering: set(27) },
+    source: 'steering',
+    line: { ...line, pull: 'tail', takeUp: 0, tillerRadius: 0.62 },
+    leads: [{ kind: 'ball', x: 0.5, y: 0.93, z: 1 }],
+    elastic: {
+      ...elastic,
+      stretch: 0.06,
+      diameterMm: 5,
+      strands: 2,
+      naturalLength: 1.13,
+      tillerRadius: 0.82,
+      anchorX: 2.06,
+      anchorY: 0.95,
+    },
+    conditions: { ...conditions, trueWindSpeedKn: 11, trueWindAngleDeg: 165, peakWavePeriodS: 4.2 },
+  },
+  {
     id: 'fin-skeg-31-reaching-main-fresh',
     name: 'Reaching in a fresh breeze, from the mainsheet',
     summary: 'Main hard in, genoa eased; the pull is hitched to a part of the mainsheet.',

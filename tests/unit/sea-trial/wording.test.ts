@@ -29,7 +29,7 @@ test('weather and events read in the units chosen', () => {
   const gust = { kind: 'gust', atS: 0, strengthKn: -4, durationS: 20 } as const
   expect(eventInWords(gust, plan, metric)).toBe('Lull of 4.0 kn for 20 s')
   const reef = { kind: 'reef', atS: 0, sail: 'main', percent: 30 } as const
-  expect(eventInWords(reef, plan, metric)).toBe('Mainsail reefed to 70 %')
+  expect(eventInWords(reef, plan, metric)).toBe('Mainsail reefed, 30 % of it taken in')
 })
 
 test('a refusal names the control and its range in the units chosen', () => {
