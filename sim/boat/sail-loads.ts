@@ -142,7 +142,7 @@ export function createSailLoads(
           pressure *= 1 - LEE_LOSS * lee * sameSide
         }
         const lift = sailLift(incidence, boom, sail.curve)
-        const drag = sailDrag(incidence, lift, sail.curve)
+        const drag = sailDrag(incidence, lift, boom, sail.curve)
         const cosA = speed > 0 ? -ax / speed : 1
         const sinA = speed > 0 ? -ay / speed : 0
         const cosB = cos(boom)

@@ -38,8 +38,8 @@ export function turnDamping(slope: number, chord: number, span: number): number 
 export const FOIL_DRAG = 0.0065
 /** Span efficiency; Whicker & Fehlner 1958. */
 const SPAN_EFFICIENCY = 0.9
-const STALL_BEGINS = 0.28
-const STALL_ENDS = 0.52
+const STALL_BEGINS = 0.36
+const STALL_ENDS = 0.62
 
 /** Share of a foil that is stalled, 0..1, at an incidence in radians. */
 export function stalledShare(incidence: number): number {
