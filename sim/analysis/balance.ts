@@ -52,7 +52,10 @@ export function balanceOf(plan: Plan): Balance {
   vessel.sails.forEach((sail, i) => {
     y[BOOM + i] = sail.heldAt
   })
+  const start = Float64Array.from(y)
   march(system, vessel, y, heading)
+  // A boat beyond the model's reach has no balance; she starts as she was put into the water.
+  if (!y.every(Number.isFinite)) y.set(start)
   const residual = polish(system, y, heading)
   const dy = new Float64Array(system.size)
   system.derivative(0, y, dy)

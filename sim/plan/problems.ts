@@ -77,6 +77,16 @@ function hullProblems({ boat, setup }: Plan): Problem[] {
       max: hull.lengthOverall,
     })
   }
+  const longest = round(boat.keel.span * hull.waterlineLength)
+  if (boat.keel.area > longest) {
+    problems.push({
+      key: 'keel.area',
+      given: boat.keel.area,
+      message: `keel.area must be from 0.2 to ${longest} m2 at this depth: the keel is no longer than the waterline`,
+      min: 0.2,
+      max: longest,
+    })
+  }
   const box = RHO_SEA * hull.waterlineLength * hull.waterlineBeam * hull.canoeBodyDraught
   const min = Math.ceil(BLOCK.min * box)
   const max = Math.floor(BLOCK.max * box)
