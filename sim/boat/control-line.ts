@@ -37,8 +37,6 @@ export interface ControlLine {
   stiffness: number
   /** Sum of the leads' friction exponents. */
   exponent: number
-  /** Turning angle at each lead as rigged, rad. */
-  turning: number[]
   elastic: {
     anchorX: number
     anchorY: number
@@ -147,7 +145,6 @@ export function controlLineOf(
     boomAtRest: source?.heldAt ?? 0,
     stiffness: ropeStrength(line.diameterMm, line.material).axialStiffness / Math.max(length, 0.2),
     exponent,
-    turning,
     elastic: {
       anchorX: anchor.x,
       anchorY: anchor.y,

@@ -24,7 +24,6 @@ export interface VesselSail {
   luffX: number
   /** Chord on which the centre of pressure is placed, m. */
   chord: number
-  luffLength: number
   footZ: number
   effortHeight: number
   reach: number
@@ -47,11 +46,11 @@ export interface VesselSail {
 }
 
 /** A sail's area and height after taking in a part of it, percent: foot and luff shrink alike. */
-export function reefedArea(area: number, percent: number): number {
+function reefedArea(area: number, percent: number): number {
   return area * (1 - percent / 100)
 }
 
-export function effortHeight(footZ: number, luff: number, percent: number): number {
+function effortHeight(footZ: number, luff: number, percent: number): number {
   return footZ + EFFORT_HEIGHT * luff * Math.sqrt(1 - percent / 100)
 }
 
@@ -86,7 +85,6 @@ export function vesselSail(plan: Plan, id: string, tack: 1 | -1): VesselSail | u
     luffFromCentre: sail.luffX - rake - hull.centreOfGravityX,
     luffX: sail.luffX,
     chord: MOMENT_CHORD * (sail.area / sail.luffLength) * Math.sqrt(1 - trim.reef / 100),
-    luffLength: sail.luffLength,
     footZ: sail.footZ,
     effortHeight: height,
     reach: sail.sheetReach,
